@@ -1,0 +1,2 @@
+/** Vitest runs outside Next: the marker that keeps server code off the client has nothing to guard here. */
+export {}

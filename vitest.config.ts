@@ -1,0 +1,30 @@
+import { defineConfig } from 'vitest/config'
+
+const alias = { '@': import.meta.dirname, 'server-only': `${import.meta.dirname}/tests/support/server-only.ts` }
+
+/** Pure suites run in parallel; suites that share a server or a database run one file at a time. */
+function project(name: string, options: { environment?: 'node' | 'jsdom'; serial?: boolean; testTimeout?: number } = {}) {
+  return {
+    resolve: { alias },
+    test: {
+      name,
+      include: [`tests/${name}/**/*.test.{ts,tsx}`],
+      environment: options.environment ?? ('node' as const),
+      fileParallelism: !options.serial,
+      testTimeout: options.testTimeout ?? 10_000,
+      hookTimeout: 120_000,
+    },
+  }
+}
+
+export default defineConfig({
+  test: {
+    projects: [
+      project('unit'),
+      project('proof'),
+      project('api', { serial: true, testTimeout: 20_000 }),
+      project('browser', { serial: true, testTimeout: 120_000 }),
+      project('faults', { serial: true, testTimeout: 300_000 }),
+    ],
+  },
+})
