@@ -11,6 +11,10 @@ export interface Precision {
 
 export const defaultPrecision: Precision = { tape: 16, dial: 0.25 }
 
+/** Left out, an entry's own tape or dial is the reader's. */
+export const readersTape = ({ tape }: Precision) => tape
+export const readersDial = ({ dial }: Precision) => dial
+
 type Fallback = number | string | null | ((precision: Precision) => number)
 
 interface Common {
@@ -81,29 +85,35 @@ export type ValueOf<F> = Raw<F> | Settled<F>
 /** What solve receives for these fields: every key present, left-out ones at their fallback. */
 export type ValuesOf<G extends Fields> = G extends Fields ? { [K in keyof G]: ValueOf<G[K]> } : never
 
-type Extra<T extends Ranged> = Omit<T, 'kind' | 'label' | 'unit'>
+type Extra<T extends Common> = Omit<T, 'kind' | 'label' | 'unit' | 'options' | 'of' | 'fields' | 'forms' | 'least' | 'most'>
+type RangedExtra = Extra<QuantityField> & Pick<Ranged, 'least' | 'most'>
+/** Of what is said besides, the types need to know only whether null stands for left out. */
+type Nullable<E> = E extends { fallback: null } ? { fallback: null } : unknown
 
-export const quantity = <const E extends Extra<QuantityField>>(label: string, unit: Unit, extra?: E) =>
-  ({ kind: 'quantity', label, unit, ...extra }) as QuantityField & E
-export const inches = <const E extends Extra<QuantityField>>(label: string, extra?: E) => quantity(label, 'in', extra)
-export const degrees = <const E extends Extra<QuantityField>>(label: string, extra?: E) => quantity(label, 'deg', extra)
-export const whole = <const E extends Extra<WholeField>>(label: string, extra?: E) =>
-  ({ kind: 'whole', label, unit: 'none', ...extra }) as WholeField & E
-export const choice = <const T extends string | number, const E extends Omit<ChoiceField, 'kind' | 'label' | 'options'>>(
+export const quantity = <const E extends RangedExtra = object>(label: string, unit: Unit, extra?: E) =>
+  ({ kind: 'quantity', label, unit, ...extra }) as QuantityField & Nullable<E>
+export const inches = <const E extends RangedExtra = object>(label: string, extra?: E) => quantity(label, 'in', extra)
+export const degrees = <const E extends RangedExtra = object>(label: string, extra?: E) => quantity(label, 'deg', extra)
+export const whole = <const E extends RangedExtra = object>(label: string, extra?: E) =>
+  ({ kind: 'whole', label, unit: 'none', ...extra }) as WholeField & Nullable<E>
+export const choice = <const T extends string | number, const E extends Extra<ChoiceField> = object>(
   label: string,
   options: readonly T[],
   extra?: E,
-) => ({ kind: 'choice', label, options, ...extra }) as ChoiceField<T> & E
-export const list = <F extends Field, const E extends Omit<Common, 'label'>>(
+) => ({ kind: 'choice', label, options, ...extra }) as ChoiceField<T> & Nullable<E>
+export const list = <F extends Field, const E extends Extra<Common & { kind: 'list' }> = object>(
   label: string,
   of: F,
   size: { least: number; most: number },
   extra?: E,
-) => ({ kind: 'list', label, of, ...size, ...extra }) as ListField<F> & E
-export const group = <G extends Fields, const E extends Omit<Common, 'label'>>(label: string, fields: G, extra?: E) =>
-  ({ kind: 'group', label, fields, ...extra }) as GroupField<G> & E
-export const forms = <const G extends readonly Fields[], const E extends Omit<Common, 'label'>>(
+) => ({ kind: 'list', label, of, ...size, ...extra }) as unknown as ListField<F> & Nullable<E>
+export const group = <G extends Fields, const E extends Extra<Common & { kind: 'group' }> = object>(
+  label: string,
+  fields: G,
+  extra?: E,
+) => ({ kind: 'group', label, fields, ...extra }) as unknown as GroupField<G> & Nullable<E>
+export const forms = <const G extends readonly Fields[], const E extends Extra<Common & { kind: 'forms' }> = object>(
   label: string,
   shapes: G,
   extra?: E,
-) => ({ kind: 'forms', label, forms: shapes, ...extra }) as FormsField<G> & E
+) => ({ kind: 'forms', label, forms: shapes, ...extra }) as unknown as FormsField<G> & Nullable<E>

@@ -1,7 +1,7 @@
 import { miterAt } from '@/lib/trade/miter'
 import { refuse } from '@/lib/trade/refusal'
 import { defineCalculator, type Note } from '../define'
-import { choice, degrees, inches } from '../fields'
+import { choice, degrees, inches, readersDial } from '../fields'
 import { onDial, onTape, toDecimals, words } from '../outputs'
 
 /** Saw setting where two bars meet: half the bend on each. Degrees, up positive; depth in inches. */
@@ -25,7 +25,7 @@ export const miter = defineCalculator({
     slopeAbove: degrees('Slope above the knuckle', { sane: [-60, 60], least: -90, most: 90, symbol: 's_{above}' }),
     depth: inches('Bar, seen from the side', { above: 0, most: 24, fallback: 1.5, symbol: 'd' }),
     dialStep: choice('Finest step of the dial', [0.25, 0.5, 1], {
-      fallback: ({ dial }) => dial,
+      fallback: readersDial,
       names: ['1/4°', '1/2°', '1°'],
     }),
   },

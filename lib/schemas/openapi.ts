@@ -1,0 +1,121 @@
+import type { AnyCalculator } from '@/lib/calculators/define'
+import { askSchema, descriptionOf, inputsSchema, outputsSchema } from './calculator'
+import { z } from './zod'
+
+const problemSchema = z.object({
+  type: z.string(),
+  title: z.string(),
+  status: z.number().int(),
+  detail: z.string().optional(),
+  errors: z.array(z.object({ field: z.string(), message: z.string() })).optional(),
+})
+
+const stepSchema = z.object({
+  says: z.string(),
+  formula: z.string().optional(),
+  substituted: z.string().optional(),
+  value: z.string(),
+})
+
+const noteSchema = z.object({ field: z.string().optional(), message: z.string() })
+const sourceSchema = z.object({ says: z.string(), where: z.string() })
+
+const json = (schema: z.ZodType, io: 'input' | 'output' = 'output') => ({
+  'application/json': { schema: bare(schema, io) },
+})
+
+/** Inside an OpenAPI document the dialect is said once, at the top. */
+function bare(schema: z.ZodType, io: 'input' | 'output') {
+  const { $schema: _, ...rest } = z.toJSONSchema(schema, { io })
+  return rest
+}
+
+const problem = (description: string) => ({
+  description,
+  content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
+})
+
+const refusals = {
+  '400': problem('The body is not JSON.'),
+  '413': problem('The body is over 64 KB.'),
+  '422': problem('One message for each wrong field, saying what would be accepted.'),
+}
+
+function answerSchema(calculator: AnyCalculator) {
+  return z.object({
+    id: z.literal(calculator.id),
+    revision: z.number().int(),
+    inputs: z.record(z.string(), z.unknown()).describe('As understood, in inches and degrees'),
+    outputs: outputsSchema(calculator.outputs),
+    text: z.record(z.string(), z.unknown()).describe('The outputs as a tape or a dial shows them'),
+    steps: z.array(stepSchema),
+    warnings: z.array(noteSchema),
+    sources: z.array(sourceSchema),
+  })
+}
+
+function pathsOf(calculator: AnyCalculator) {
+  const path = `/api/calculators/${calculator.id}`
+  const tags = [calculator.stage]
+  const body = { required: true, content: json(askSchema.extend({ inputs: inputsSchema(calculator.inputs) }), 'input') }
+  return {
+    [path]: {
+      get: {
+        operationId: `describe-${calculator.id}`,
+        summary: `What ${calculator.name} takes and gives`,
+        tags,
+        responses: { '200': { description: 'The description', content: json(z.record(z.string(), z.unknown())) } },
+      },
+      post: {
+        operationId: calculator.id,
+        summary: calculator.asks,
+        description: calculator.lede,
+        tags,
+        requestBody: body,
+        responses: { '200': { description: 'The answer', content: json(answerSchema(calculator)) }, ...refusals },
+      },
+    },
+    [`${path}/sheet`]: {
+      post: {
+        operationId: `sheet-${calculator.id}`,
+        summary: `The printable sheet of ${calculator.name}`,
+        tags,
+        requestBody: body,
+        responses: {
+          '200': { description: 'One page, PDF', content: { 'application/pdf': { schema: { type: 'string', format: 'binary' } } } },
+          ...refusals,
+        },
+      },
+    },
+  }
+}
+
+/** The OpenAPI 3.1 description of what is open to everybody, made from the very schemas and fields that are served. */
+export function openapi(calculators: readonly AnyCalculator[]) {
+  return {
+    openapi: '3.1.0',
+    info: {
+      title: 'Longpoint calculators',
+      version: '1',
+      description: 'Shop calculators for stair rail work. Lengths in inches and angles in degrees unless a unit says otherwise. The adopted local code and a licensed professional decide.',
+      license: { name: 'MIT', identifier: 'MIT' },
+    },
+    servers: [{ url: '/' }],
+    security: [],
+    tags: [...new Set(calculators.map(({ stage }) => stage))].map((name) => ({ name })),
+    paths: {
+      '/api/calculators': {
+        get: {
+          operationId: 'list-calculators',
+          summary: 'Every calculator with its inputs and outputs',
+          responses: { '200': { description: 'The list', content: json(z.array(z.record(z.string(), z.unknown()))) } },
+        },
+      },
+      ...Object.assign({}, ...calculators.map(pathsOf)),
+    },
+    components: { schemas: { Problem: bare(problemSchema, 'output') } },
+  }
+}
+
+/** The list that GET /api/calculators gives. */
+export const listing = (calculators: readonly AnyCalculator[]) => calculators.map(descriptionOf)
