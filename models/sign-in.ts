@@ -1,0 +1,35 @@
+import {
+  DataTypes,
+  Model,
+  type CreationOptional,
+  type InferAttributes,
+  type InferCreationAttributes,
+  type Sequelize,
+} from 'sequelize'
+import { idColumn, instantColumn } from './columns'
+import { uuidv7 } from './uuid'
+
+/** One session on one device. Ended rows stay, so that the list can show them go. */
+export class SignIn extends Model<InferAttributes<SignIn>, InferCreationAttributes<SignIn>> {
+  declare id: CreationOptional<string>
+  declare userId: string
+  declare startedAt: Date
+  declare lastSeenAt: Date
+  declare endedAt: CreationOptional<Date | null>
+  /** What the browser calls itself, shortened. */
+  declare agent: string
+}
+
+export function defineSignIn(sequelize: Sequelize) {
+  SignIn.init(
+    {
+      id: { type: idColumn, primaryKey: true, defaultValue: () => uuidv7() },
+      userId: idColumn,
+      startedAt: instantColumn,
+      lastSeenAt: instantColumn,
+      endedAt: instantColumn,
+      agent: DataTypes.STRING(200),
+    },
+    { sequelize, tableName: 'sign_ins', timestamps: false },
+  )
+}
