@@ -15,6 +15,8 @@ export const jobChangeSchema = z.object({
   place: optionalText('The place', 200).optional(),
   client: optionalText('The client', 120).optional(),
   notes: optionalText('The notes', 4000).optional(),
+  /** Puts the job away, or takes it out again. */
+  archived: z.boolean().optional(),
   version: versionField,
 })
 
