@@ -15,7 +15,7 @@ export class IdempotencyKey extends Model<InferAttributes<IdempotencyKey>, Infer
   declare key: string
   declare requestHash: string
   declare status: number
-  declare answer: CreationOptional<unknown>
+  declare answer: CreationOptional<object | null>
   declare createdAt: CreationOptional<Date>
 }
 

@@ -1,6 +1,6 @@
 import 'server-only'
 import { createHmac } from 'node:crypto'
-import { Op, UniqueConstraintError } from 'sequelize'
+import { UniqueConstraintError } from 'sequelize'
 import { config } from '@/lib/config'
 import { Unfit } from '@/lib/errors'
 import { IdempotencyKey } from '@/models'
@@ -17,10 +17,8 @@ export interface Call {
 
 export interface Answer {
   status: number
-  answer: unknown
+  answer: object | null
 }
-
-const keptForMs = 24 * 3600_000
 
 /**
  * Does `work` once for a key, however often and however close together the call comes; a repeat gets the first answer.
@@ -28,7 +26,7 @@ const keptForMs = 24 * 3600_000
  * call that comes while the first is under way waits on its row.
  * @throws Unfit when the key was used for another request.
  */
-export async function once(call: Call, status: number, work: () => Promise<unknown>): Promise<Answer> {
+export async function once(call: Call, status: number, work: () => Promise<object>): Promise<Answer> {
   const requestHash = hashOf(call.asked)
   const { owner, key } = call
   try {
@@ -60,9 +58,4 @@ async function answerGiven({ owner, key }: Call, requestHash: string): Promise<A
   if (row.requestHash !== requestHash)
     throw new Unfit([{ field: 'Idempotency-Key', message: 'This key was used for another request: take a new one.' }])
   return { status: row.status, answer: row.answer }
-}
-
-/** Forgets answers a day old. Gives how many. */
-export async function forgetOldAnswers(now: number = Date.now()): Promise<number> {
-  return IdempotencyKey.destroy({ where: { createdAt: { [Op.lt]: new Date(now - keptForMs) } } })
 }

@@ -75,4 +75,5 @@ export type NewJob = z.output<typeof jobSchema>
 export type JobChange = z.output<typeof jobChangeSchema>
 export type SheetForm = z.input<typeof sheetSchema>
 export type NewSheet = z.output<typeof sheetSchema>
+export type SheetRevisionForm = z.input<typeof sheetRevisionSchema>
 export type SheetRevision = z.output<typeof sheetRevisionSchema>
