@@ -73,6 +73,12 @@ function step({ rises, run }: FlightFigures, judgeRise: (rise: number) => Judged
   return together(stepText(rises, run), [...risers, onlyRun(run, leastRun)])
 }
 
+/** No reach at all fails whatever the run is. */
+function bottomReach(reach: number, run: number | null): Judged {
+  if (run !== null) return least(reach, run)
+  return reach <= 0 ? { ok: false, value: reach, margin: reach } : { ...unmeasured, value: reach }
+}
+
 /** OSHA and ADA rows were read in the public text; the building codes are from memory and secondary text. */
 export const codeRules: readonly RowRule[] = [
   {
@@ -97,11 +103,7 @@ export const codeRules: readonly RowRule[] = [
     id: 'bottom-extension-tread',
     limit: 'one run or more, horizontally',
     source: 'IBC 1014, ADA 505.10.3',
-    judge: ({ bottomExtensionHoriz, flights: [first] }) => [
-      typeof first?.run === 'number'
-        ? least(bottomExtensionHoriz, first.run)
-        : { ...unmeasured, value: bottomExtensionHoriz },
-    ],
+    judge: ({ bottomExtensionHoriz, flights: [first] }) => [bottomReach(bottomExtensionHoriz, first?.run ?? null)],
   },
   {
     id: 'grip-1.25-2',
