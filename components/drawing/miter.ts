@@ -1,5 +1,5 @@
 import type { Drawing, LabelRequest, Show, Spot } from '@/lib/drawing/sketch'
-import { angleArc, breakLine, longPoint, nudged, outline, path, spot, toward } from '@/lib/drawing/strokes'
+import { angleArc, longPoint, nudged, outline, path, spot, tornEdge, toward } from '@/lib/drawing/strokes'
 import { degrees, dial, length, plain, shape, word } from '@/lib/drawing/text'
 import { cosDeg } from '@/lib/trade/angles'
 import type { MiterAnswer } from '@/lib/trade/miter'
@@ -34,10 +34,8 @@ export const draw: Drawing<Given, MiterAnswer> = (given, solved, show) => {
   const bends = solved.bend > 0.05
   return {
     strokes: [
-      outline('object', [lowTop, top, under, lowUnder], 'face'),
-      outline('object', [top, highTop, highUnder, under], 'face'),
-      breakLine(lowTop, lowUnder),
-      breakLine(highTop, highUnder),
+      outline('object', [top, under, ...tornEdge(lowUnder, lowTop)], 'face'),
+      outline('object', [under, top, ...tornEdge(highTop, highUnder)], 'face'),
       path('cut', [nudged(top, face + 180, 40), nudged(under, face, 40)]),
       ...(bends ? [longPoint(long, onTop ? 90 : -90, undefined, 14)] : []),
       ...(bends ? bendArc(middle, given) : []),
@@ -102,7 +100,7 @@ function labelsOf(given: Given, solved: MiterAnswer, show: Show, at: Places): La
     ...(at.bends
       ? [
           { kind: 'at', text: [[word('bend '), ...degrees(solved.bend, 1)]], size: 'number', spot: nudged(at.middle, (slopeBelow + slopeAbove) / 2, 150), prefer: [(slopeBelow + slopeAbove) / 2, 0, 30], gap: 8, required: full } as const,
-          { kind: 'at', text: [[word(at.onTop ? 'long on top' : 'long underneath', 'cut')]], size: 'number', spot: nudged(at.long, at.onTop ? 90 : -90, 14), prefer: at.onTop ? [135, 45, 180, 0] : [-135, -45, 180, 0], gap: 6, required: true } as const,
+          { kind: 'at', text: [[word(at.onTop ? 'long on top' : 'long underneath', 'cut')]], size: 'number', spot: nudged(at.long, at.onTop ? 90 : -90, 14), prefer: at.onTop ? [45, 135, 0, 180] : [-45, -135, 0, 180], gap: 6, required: true } as const,
           ...setbackOf(given, solved, show, at),
         ]
       : []),
@@ -115,7 +113,7 @@ function labelsOf(given: Given, solved: MiterAnswer, show: Show, at: Places): La
 function setbackOf({ slopeBelow }: Given, solved: MiterAnswer, show: Show, at: Places): LabelRequest[] {
   const foot = toward(at.long, slopeBelow + 180, solved.setback)
   return [
-    { kind: 'dimension', text: [[...length(solved.setback, show), word(' each')]], size: 'number', from: foot, to: at.long, side: at.onTop ? 'left' : 'right', offset: 46, required: false },
+    { kind: 'dimension', text: [[...length(solved.setback, show), word(' each')]], size: 'number', from: foot, to: at.long, side: at.onTop ? 'left' : 'right', offset: 46, required: show.detail === 'full' && solved.setback > 1 / 16 },
   ]
 }
 

@@ -39,12 +39,12 @@ export function extentOfBox(box: Box): Extent {
   return { left: box.x - across, top: box.y - down, right: box.x + across, bottom: box.y + down }
 }
 
-/** True when the two share any point: separating axes, the two directions of each box. */
-export function boxesTouch(a: Box, b: Box): boolean {
-  return !apartAlong(a, b) && !apartAlong(b, a)
+/** True when the two come within `air` of each other: separating axes, the two directions of each box. */
+export function boxesTouch(a: Box, b: Box, air = 0): boolean {
+  return !apartAlong(a, b, air) && !apartAlong(b, a, air)
 }
 
-function apartAlong(a: Box, b: Box): boolean {
+function apartAlong(a: Box, b: Box, air: number): boolean {
   const dx = b.x - a.x
   const dy = b.y - a.y
   const cos = Math.abs(a.cos * b.cos + a.sin * b.sin)
@@ -52,8 +52,8 @@ function apartAlong(a: Box, b: Box): boolean {
   const along = Math.abs(dx * a.cos + dy * a.sin)
   const across = Math.abs(dy * a.cos - dx * a.sin)
   return (
-    along > a.halfWidth + b.halfWidth * cos + b.halfHeight * sin ||
-    across > a.halfHeight + b.halfWidth * sin + b.halfHeight * cos
+    along > air + a.halfWidth + b.halfWidth * cos + b.halfHeight * sin ||
+    across > air + a.halfHeight + b.halfWidth * sin + b.halfHeight * cos
   )
 }
 
@@ -61,19 +61,19 @@ function apartAlong(a: Box, b: Box): boolean {
 export function segmentTouches(box: Box, a: Point, b: Point, half: number): boolean {
   const ax = (a.x - box.x) * box.cos + (a.y - box.y) * box.sin
   const ay = (a.y - box.y) * box.cos - (a.x - box.x) * box.sin
-  const bx = (b.x - box.x) * box.cos + (b.y - box.y) * box.sin
-  const by = (b.y - box.y) * box.cos - (b.x - box.x) * box.sin
-  const across = clip(ax, bx - ax, box.halfWidth + half, [0, 1])
-  return across !== null && clip(ay, by - ay, box.halfHeight + half, across) !== null
-}
-
-function clip(start: number, run: number, limit: number, [from, to]: [number, number]): [number, number] | null {
-  if (Math.abs(run) < 1e-9) return Math.abs(start) <= limit ? [from, to] : null
-  const one = (-limit - start) / run
-  const two = (limit - start) / run
-  const entering = Math.max(from, Math.min(one, two))
-  const leaving = Math.min(to, Math.max(one, two))
-  return entering <= leaving ? [entering, leaving] : null
+  const dx = (b.x - a.x) * box.cos + (b.y - a.y) * box.sin
+  const dy = (b.y - a.y) * box.cos - (b.x - a.x) * box.sin
+  const width = box.halfWidth + half
+  const height = box.halfHeight + half
+  if (Math.abs(dx) < 1e-9 && Math.abs(ax) > width) return false
+  if (Math.abs(dy) < 1e-9 && Math.abs(ay) > height) return false
+  // Shares of the line at which it enters and leaves each pair of sides.
+  const alongX = dx === 0 ? Infinity : width / Math.abs(dx)
+  const alongY = dy === 0 ? Infinity : height / Math.abs(dy)
+  const middleX = dx === 0 ? 0 : -ax / dx
+  const middleY = dy === 0 ? 0 : -ay / dy
+  const entering = Math.max(0, middleX - alongX, middleY - alongY)
+  return entering <= Math.min(1, middleX + alongX, middleY + alongY)
 }
 
 /** True when two lines cross or touch. */

@@ -6,7 +6,7 @@ import { placeDimension } from './place-dimension'
 import type { Placement } from './placing'
 import type { Mark, Plate } from './plate'
 import { markOf, type Projection } from './projection'
-import type { LabelRequest, Sketch, Spot, Stroke } from './sketch'
+import type { Dimension, LabelAlong, LabelAt, LabelRequest, Sketch, Spot, Stroke } from './sketch'
 
 /** The paper to fill, px. Paper too small for the sketch grows, height before width. */
 export interface Viewport {
@@ -31,8 +31,11 @@ interface Attempt {
 }
 
 /** Shares of the largest scale, tried from the top: a little smaller is worth it when labels then lie where they belong. */
-const shares = [1, 0.96, 0.92, 0.88, 0.84, 0.8, 0.75, 0.7, 0.65, 0.6, 0.55, 0.5, 0.44, 0.38, 0.32, 0.26]
-const droppedCost = 5
+const shares = [1, 0.94, 0.88, 0.82, 0.76, 0.7, 0.63, 0.56, 0.49, 0.42, 0.35, 0.28]
+/** What it costs to leave out an optional label that does not say its own worth. */
+const usualWorth = 4
+/** A dimension that became a label on a leader says less. */
+const besideCost = 6
 
 /** Fits a sketch to its paper, to scale, with no label on a line or on another. Pure and repeatable. */
 export function compose(sketch: Sketch, viewport: Viewport): Plate {
@@ -61,22 +64,27 @@ function bestAttempt(strokes: readonly Stroke[], labels: readonly LabelRequest[]
   let best: Attempt | null = null
   for (const share of shares) {
     if (largest === 0 || (best && share * 100 <= best.worth)) break
-    const attempt = attemptAt({ ...sizes, scale: largest * share }, strokes, labels, room)
-    if (attempt && (!best || attempt.worth + share * 100 > best.worth)) best = { ...attempt, worth: attempt.worth + share * 100 }
+    const affordable: number = best ? share * 100 - best.worth : Infinity
+    const attempt = attemptAt({ ...sizes, scale: largest * share }, strokes, labels, room, affordable)
+    if (attempt) best = { ...attempt, worth: attempt.worth + share * 100 }
   }
   return best
 }
 
-function attemptAt(projection: Projection, strokes: readonly Stroke[], labels: readonly LabelRequest[], room: Room): Attempt | null {
+/** Lays everything out at one scale; null when a required label fits nowhere, or the whole costs more than is affordable. */
+function attemptAt(projection: Projection, strokes: readonly Stroke[], labels: readonly LabelRequest[], room: Room, affordable: number): Attempt | null {
   const field = new Field(room.width, room.height)
   const marks = strokes.map((stroke) => markOf(stroke, projection))
   for (const mark of marks) field.addMark(mark)
   if (!field.holds()) return null
   const placements: Placement[] = []
   let dropped = 0
+  let cost = 0
   for (const request of labels) {
     const placement = place(request, projection, field)
     if (!placement && request.required) return null
+    cost += placement ? placement.cost : (request.worth ?? usualWorth)
+    if (cost >= affordable) return null
     if (!placement) {
       dropped++
       continue
@@ -85,13 +93,24 @@ function attemptAt(projection: Projection, strokes: readonly Stroke[], labels: r
     field.addBox(placement.label.box)
     placements.push(placement)
   }
-  const cost = placements.reduce((sum, p) => sum + p.cost, 0) + dropped * droppedCost
   return { scale: projection.scale, marks, placements, extent: field.extent, dropped, worth: -cost }
 }
 
 function place(request: LabelRequest, projection: Projection, field: Field): Placement | null {
   if (request.kind === 'at') return placeAt(request, projection, field)
-  return request.kind === 'along' ? placeAlong(request, projection, field) : placeDimension(request, projection, field)
+  const wished = request.kind === 'dimension' ? placeDimension(request, projection, field) : placeAlong(request, projection, field)
+  if (wished || !request.required) return wished
+  const beside = placeAt(besideMiddle(request), projection, field)
+  return beside && { ...beside, cost: beside.cost + besideCost }
+}
+
+/** A label that must stand, and found no room along its line, hangs on a leader from the middle of it. */
+function besideMiddle(request: LabelAlong | Dimension): LabelAt {
+  const { from, to, text, size, part, required, side } = request
+  const badge = request.kind === 'along' ? request.badge : undefined
+  const half = (a = 0, b = 0) => (a + b) / 2
+  const spot = { x: half(from.x, to.x), y: half(from.y, to.y), dx: half(from.dx, to.dx), dy: half(from.dy, to.dy) }
+  return { kind: 'at', text, size, part, badge, required, spot, prefer: side === 'below' || side === 'right' ? [-90, -60, -120] : [90, 60, 120], gap: 14 }
 }
 
 /** The largest scale at which the bare strokes fit, by halving; 0 when their paper-sized pieces alone do not. */

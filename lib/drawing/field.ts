@@ -51,12 +51,28 @@ export class Field {
 
   /** True when a label may lie here: on the paper, off every line and label by the clearance. */
   isFree(box: Box, clearance: number): boolean {
-    const roomy = { ...box, halfWidth: box.halfWidth + clearance, halfHeight: box.halfHeight + clearance }
-    const extent = extentOfBox(roomy)
-    if (!this.holds(extentOfBox(box))) return false
+    const across = Math.abs(box.cos) * box.halfWidth + Math.abs(box.sin) * box.halfHeight
+    const down = Math.abs(box.sin) * box.halfWidth + Math.abs(box.cos) * box.halfHeight
+    if (!this.holdsBox(box, across, down)) return false
+    const left = box.x - across - clearance
+    const right = box.x + across + clearance
+    const top = box.y - down - clearance
+    const bottom = box.y + down + clearance
+    for (const { box: other, extent: e } of this.boxes) {
+      if (left <= e.right && e.left <= right && top <= e.bottom && e.top <= bottom && boxesTouch(box, other, clearance)) return false
+    }
+    for (const s of this.segments) {
+      if (left > s.right || s.left > right || top > s.bottom || s.top > bottom) continue
+      if (segmentTouches(box, s.a, s.b, s.half + clearance)) return false
+    }
+    return true
+  }
+
+  private holdsBox({ x, y }: Box, across: number, down: number): boolean {
+    const { left, right, top, bottom } = this.extent
     return (
-      !this.boxes.some((other) => near(extent, other.extent) && boxesTouch(roomy, other.box)) &&
-      !this.segments.some((s) => near(extent, s) && segmentTouches(roomy, s.a, s.b, s.half))
+      Math.max(right, x + across) - Math.min(left, x - across) <= this.width &&
+      Math.max(bottom, y + down) - Math.min(top, y - down) <= this.height
     )
   }
 
@@ -69,8 +85,4 @@ export class Field {
   crossings(a: Point, b: Point, inks: ReadonlySet<Ink>): number {
     return this.segments.filter((s) => inks.has(s.ink) && segmentsCross(a, b, s.a, s.b)).length
   }
-}
-
-function near(a: Extent, b: Extent): boolean {
-  return a.left <= b.right && b.left <= a.right && a.top <= b.bottom && b.top <= a.bottom
 }

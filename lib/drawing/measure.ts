@@ -57,7 +57,7 @@ function layRun(run: Run, x: number, px: number): { runs: PlacedRun[]; end: numb
   const ink = run.ink ?? 'text'
   if (run.kind === 'fraction') return layFraction(run.over, run.under, x, px, ink)
   if (run.kind === 'shape') {
-    const width = px * (run.shape === 'arrow' ? 1.5 : 0.66)
+    const width = px * (run.shape.startsWith('arrow') ? 1.5 : 0.66)
     return { runs: [{ kind: 'shape', shape: run.shape, x, y: 0, size: px, width, ink }], end: x + width }
   }
   const face = run.kind === 'number' ? 'mono' : 'word'

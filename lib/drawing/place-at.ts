@@ -14,7 +14,7 @@ const leaderFrom = 15
 export function placeAt(request: LabelAt, projection: Projection, field: Field): Placement | null {
   const spot = project(request.spot, projection)
   const scale = projection.textScale
-  const reach = request.reach ?? (request.required ? 260 : 60)
+  const reach = request.reach ?? (request.required ? 150 : 50)
   for (const distance of distances(request.gap ?? 7, reach)) {
     for (const [rank, way] of ways(request.prefer, distance).entries()) {
       const placement = tryAt(request, projection, field, spot, way, distance * scale)
@@ -29,7 +29,7 @@ export function placeAt(request: LabelAt, projection: Projection, field: Field):
 function distances(gap: number, reach: number): number[] {
   const all = [gap]
   for (let d = gap; d < reach; ) {
-    d += Math.max(4, d * 0.22)
+    d += Math.max(5, d * 0.34)
     all.push(Math.min(d, reach))
   }
   return all

@@ -96,16 +96,22 @@ function labelOn(run: Run, request: Dimension, body: Body, field: Field, marks: 
   const gap = (roomy ? 5 : 9) * scale + body.halfHeight
   const [first, last] = along.x * (run.to.x - run.from.x) + along.y * (run.to.y - run.from.y) >= 0 ? [run.from, run.to] : [run.to, run.from]
   const past = 11 * scale + body.halfWidth
-  const centres = [
-    ...(roomy ? shares : [0.5]).map((share) => moved(between(run.from, run.to, share), up, gap)),
-    ...(roomy ? shares : [0.5]).map((share) => moved(between(run.from, run.to, share), up, -gap)),
+  const middle = between(run.from, run.to, 0.5)
+  const inner = roomy ? shares : [0.5]
+  const spread = 10 * scale + Math.abs(run.out.x) * body.halfWidth + Math.abs(run.out.y) * body.halfHeight
+  const upright = { centre: moved(middle, run.out, spread), turn: 0 }
+  const turned = [
+    ...inner.map((share) => moved(between(run.from, run.to, share), up, gap)),
+    ...inner.map((share) => moved(between(run.from, run.to, share), up, -gap)),
     moved(last, along, past),
     moved(first, along, -past),
-  ]
-  for (const [rank, centre] of centres.entries()) {
-    const box = boxAt(body, centre, turn)
+  ].map((centre) => ({ centre, turn }))
+  // Words longer than a steep line read better level beside it.
+  const places = roomy || Math.abs(turn) < 30 ? [...turned, upright] : [upright, ...turned]
+  for (const [rank, place] of places.entries()) {
+    const box = boxAt(body, place.centre, place.turn)
     if (field.isFree(box, clearance * scale) && marks.every((mark) => !touches(mark, box))) {
-      return { label: labelIn(request, body, box, turn), cost: rank * 0.3 }
+      return { label: labelIn(request, body, box, place.turn), cost: rank * 0.9 }
     }
   }
   return null

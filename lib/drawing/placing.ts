@@ -23,7 +23,22 @@ export interface Body {
   badge?: 'disc'
 }
 
-export function bodyOf(request: LabelRequest, { textScale }: Projection, align: 'start' | 'middle' | 'end' = 'middle'): Body {
+type Align = 'start' | 'middle' | 'end'
+
+/** One request is laid out once, though it is tried in hundreds of places. */
+const laid = new WeakMap<LabelRequest, Map<string, Body>>()
+
+/** A request's size on paper, its lines set to one side or centred. */
+export function bodyOf(request: LabelRequest, { textScale }: Projection, align: Align = 'middle'): Body {
+  const known = laid.get(request) ?? new Map<string, Body>()
+  laid.set(request, known)
+  const key = `${textScale} ${align}`
+  const body = known.get(key) ?? layBody(request, textScale, align)
+  known.set(key, body)
+  return body
+}
+
+function layBody(request: LabelRequest, textScale: number, align: Align): Body {
   const text = layText(request.text, request.size, textScale, align)
   const badge = badgeOf(request)
   if (badge) {

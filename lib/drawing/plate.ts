@@ -13,7 +13,7 @@ export interface Mark {
   passable?: boolean
 }
 
-export type Shape = 'arrow' | 'triangle-down' | 'triangle-up'
+export type Shape = 'arrow' | 'arrow-left' | 'triangle-down' | 'triangle-up'
 
 /** A piece of a label, at its place inside it: px from the label's own left end and first baseline, y down. */
 export type PlacedRun = { x: number; y: number; size: number; width: number; ink: LabelInk } & (

@@ -10,7 +10,7 @@ export function shapeOutline({ shape, x, y, size, width }: Extract<PlacedRun, { 
   const shaft = size * 0.05
   const head = size * 0.22
   const neck = x + width - size * 0.42
-  return [
+  const right = [
     { x: x + size * 0.12, y: middle - shaft },
     { x: neck, y: middle - shaft },
     { x: neck, y: middle - head },
@@ -19,4 +19,6 @@ export function shapeOutline({ shape, x, y, size, width }: Extract<PlacedRun, { 
     { x: neck, y: middle + shaft },
     { x: x + size * 0.12, y: middle + shaft },
   ]
+  // Pointing left, the same outline turned about its own middle.
+  return shape === 'arrow' ? right : right.map((p) => ({ x: 2 * x + width - p.x, y: p.y }))
 }

@@ -40,6 +40,8 @@ export type Stroke = PathStroke | ArcStroke
 
 interface Asked {
   required: boolean
+  /** How much scale an optional label is worth, in hundredths of the largest. */
+  worth?: number
   part?: string
 }
 export type LabelSize = 'answer' | 'number' | 'note'

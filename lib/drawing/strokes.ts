@@ -35,12 +35,12 @@ export function longPoint(tip: Spot, way: number, part?: string, size = 12): Pat
   return outline('flag', [tip, nudged(tip, way + 27, size), nudged(tip, way - 27, size)], 'solid', { part })
 }
 
-/** Zigzag where a bar goes on beyond the drawing, across from one face to the other. */
-export function breakLine(a: Spot, b: Spot, part?: string): PathStroke {
+/** The points of a torn edge from one face of a bar to the other: the bar goes on beyond the drawing. */
+export function tornEdge(a: Spot, b: Spot): Spot[] {
   const along = (share: number, off: number): Spot => {
     const dx = b.x - a.x
     const dy = b.y - a.y
     return { x: a.x + dx * share - dy * off, y: a.y + dy * share + dx * off, dx: a.dx, dy: a.dy }
   }
-  return path('dim', [along(-0.18, 0), along(0.34, 0), along(0.44, 0.22), along(0.56, -0.22), along(0.66, 0), along(1.18, 0)], { part })
+  return [a, along(0.4, 0), along(0.45, 0.2), along(0.55, -0.2), along(0.6, 0), b]
 }

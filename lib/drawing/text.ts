@@ -21,7 +21,17 @@ export const shape = (which: Shape, ink?: LabelInk): Run => ({ kind: 'shape', sh
 /** A length as the tape reads it: feet, inches and a true fraction, with primes. Inches in. */
 export function length(inches: number, show: Show, ink?: LabelInk): Line {
   if (show.metric) return [number(showMetric(inches), ink)]
-  const { negative, feet, inches: whole, numerator, denominator } = tapeParts(inches, show.tape)
+  return tapeLine(tapeParts(inches, show.tape), ink)
+}
+
+/** A height or a depth, which the trade says in inches alone: 36″, not 3′. Inches in. */
+export function inchesOnly(inches: number, show: Show, ink?: LabelInk): Line {
+  if (show.metric) return [number(showMetric(inches), ink)]
+  const parts = tapeParts(inches, show.tape)
+  return tapeLine({ ...parts, feet: 0, inches: parts.feet * 12 + parts.inches }, ink)
+}
+
+function tapeLine({ negative, feet, inches: whole, numerator, denominator }: ReturnType<typeof tapeParts>, ink?: LabelInk): Line {
   const sign = negative ? '−' : ''
   const hasFraction = numerator > 0
   const runs: Run[] = feet > 0 ? [number(`${sign}${feet}`, ink), word('′', ink ?? 'text')] : []
