@@ -38,7 +38,7 @@ export function unwind() {
   return unwinding
 }
 
-/** True once this process has begun to end: children that leave now do so because they were told to. */
+/** True once this process has begun to end: what fails now fails because it was told to stop. */
 export function isUnwinding() {
   return unwinding !== undefined
 }

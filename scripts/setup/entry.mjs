@@ -1,7 +1,7 @@
 // @ts-check
 import { existsSync, statfsSync } from 'node:fs'
 import path from 'node:path'
-import { unwind, unwindOnSignals } from './cleanup.mjs'
+import { isUnwinding, unwind, unwindOnSignals } from './cleanup.mjs'
 import { Stop } from './stop.mjs'
 
 const fullBelowBytes = 32 * 1024 * 1024
@@ -23,8 +23,10 @@ export async function enter(main) {
   try {
     code = await main()
   } catch (error) {
-    process.stderr.write(`\n${explain(error)}\n`)
+    if (!isUnwinding()) process.stderr.write(`\n${explain(error)}\n`)
   }
+  // A signal has its own way out, with its own code.
+  if (isUnwinding()) return
   await unwind()
   process.exit(code)
 }

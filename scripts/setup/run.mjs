@@ -14,10 +14,9 @@ const keptLines = 25
  */
 export function run(command, args, options = {}) {
   return new Promise((resolve) => {
-    const child = spawn(command, args, { stdio: ['ignore', 'pipe', 'pipe'], ...options })
-    const forget = defer(() => {
-      child.kill('SIGTERM')
-    })
+    // A group of its own: a command that is cut short takes along whatever it started in turn.
+    const child = spawn(command, args, { stdio: ['ignore', 'pipe', 'pipe'], detached: true, ...options })
+    const forget = defer(() => endGroup(child))
     let output = ''
     const keep = (/** @type {Buffer} */ chunk) => (output += chunk.toString())
     child.stdout.on('data', keep)
@@ -28,6 +27,19 @@ export function run(command, args, options = {}) {
       end(127)
     })
     child.on('close', (code) => end(code ?? 1))
+  })
+}
+
+/**
+ * SIGTERM to a command and everything in its group; returns when the command itself is gone.
+ * @param {import('node:child_process').ChildProcess} leader
+ * @returns {Promise<void>}
+ */
+export function endGroup(leader) {
+  return new Promise((resolve) => {
+    if (leader.pid === undefined || leader.exitCode !== null || leader.signalCode !== null) return resolve()
+    leader.once('exit', () => resolve())
+    process.kill(-leader.pid, 'SIGTERM')
   })
 }
 

@@ -18,22 +18,20 @@ export interface ServiceSpec {
   record?: (pid: number) => void
 }
 
-const restartsAllowed = 5
-const restartWindowMs = 60_000
+type Probe = () => Promise<boolean>
+
+const failuresAllowed = 5
+const revivedWithinMs = 60_000
 
 /** A program that runs beside us in a process group of its own, so that Ctrl-C reaches only us and we end it in order. */
 export class Service {
   #child: ChildProcess
+  #ended: Promise<void>
   #stopping = false
-  #restarts: number[] = []
-  #onGiveUp: ((name: string) => void) | undefined
 
   constructor(readonly spec: ServiceSpec) {
     this.#child = this.#launch()
-  }
-
-  get pid(): number | undefined {
-    return this.#child.pid
+    this.#ended = endOf(this.#child)
   }
 
   get hasEnded(): boolean {
@@ -41,7 +39,7 @@ export class Service {
   }
 
   /** Ask until it answers. False when it ended first, or when the time is over. */
-  async answers(probe: () => Promise<boolean>, timeoutMs: number): Promise<boolean> {
+  async answers(probe: Probe, timeoutMs: number): Promise<boolean> {
     const until = Date.now() + timeoutMs
     while (!this.hasEnded && Date.now() < until) {
       if (await probe()) return true
@@ -50,10 +48,17 @@ export class Service {
     return false
   }
 
-  /** From now on start it again when it dies, and say so; give up when it keeps dying. */
-  keepAlive(onGiveUp: (name: string) => void) {
-    this.#onGiveUp = onGiveUp
-    if (this.hasEnded) this.#revive()
+  /** From now on start it again whenever it dies. Returns when it was stopped, or would not come up five times running. */
+  async keepAlive(probe: Probe): Promise<void> {
+    for (let failures = 0; failures < failuresAllowed;) {
+      await this.#ended
+      await wait(failures * 500)
+      if (this.#stopping) return
+      process.stderr.write(`${this.spec.name} ended unexpectedly: starting it again.\n`)
+      this.#child = this.#launch()
+      this.#ended = endOf(this.#child)
+      failures = (await this.answers(probe, revivedWithinMs)) ? 0 : failures + 1
+    }
   }
 
   /** SIGTERM, then SIGKILL to the whole group when the grace is over. Returns when it is gone. */
@@ -61,33 +66,29 @@ export class Service {
     this.#stopping = true
     if (this.#child.pid === undefined) return
     if (!this.hasEnded) {
-      const ended = new Promise<void>((resolve) => this.#child.once('exit', () => resolve()))
       this.#child.kill('SIGTERM')
-      await Promise.race([ended, wait(this.spec.graceMs, undefined, { ref: false })])
+      await Promise.race([this.#ended, wait(this.spec.graceMs, undefined, { ref: false })])
     }
     // The leader's number stays taken as long as its group lives, so this reaches ours or nobody.
     signalGroup(this.#child.pid, 'SIGKILL')
   }
 
   #launch(): ChildProcess {
-    const { command, args, env, log, record } = this.spec
+    const { command, args, env, log, record, name } = this.spec
     const output = log === 'inherit' ? 'inherit' : openSync(log, 'a', 0o600)
     const child = spawn(command, args, { env, detached: true, stdio: ['ignore', output, output] })
     if (typeof output === 'number') closeSync(output)
     if (child.pid !== undefined) record?.(child.pid)
-    child.on('error', (error) => process.stderr.write(`${this.spec.name}: ${error.message}\n`))
-    child.on('exit', () => this.#onGiveUp && this.#revive())
+    child.on('error', (error) => process.stderr.write(`${name}: ${error.message}\n`))
     return child
   }
+}
 
-  #revive() {
-    if (this.#stopping) return
-    const now = Date.now()
-    this.#restarts = [...this.#restarts.filter((at) => now - at < restartWindowMs), now]
-    if (this.#restarts.length > restartsAllowed) return this.#onGiveUp?.(this.spec.name)
-    process.stderr.write(`${this.spec.name} ended unexpectedly: starting it again.\n`)
-    this.#child = this.#launch()
-  }
+function endOf(child: ChildProcess): Promise<void> {
+  return new Promise((resolve) => {
+    child.once('exit', () => resolve())
+    child.once('error', () => resolve())
+  })
 }
 
 /** End processes that a killed start left behind: SIGTERM, then SIGKILL when the grace is over. */

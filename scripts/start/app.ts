@@ -46,20 +46,21 @@ export async function buildWhenStale(env: NodeJS.ProcessEnv): Promise<void> {
   if (!isCurrent(distDirectory(env))) await runScript('Building the app', 'scripts/build.ts', env)
 }
 
-/** Start the app and wait until it answers. Throws Stop when it does not. */
-export async function startApp({ dev, host, port, env, log, record }: AppSettings): Promise<Service> {
+/** Start the app and wait until it answers. Gives what keeps it alive from then on. Throws Stop when it does not answer. */
+export async function startApp({ dev, host, port, env, log, record }: AppSettings) {
   const args = [next, dev ? 'dev' : 'start', '--hostname', host, '--port', String(port)]
   const service = new Service({ name: 'The app', command: process.execPath, args, env, log, graceMs: 10_000, record })
   defer(() => service.stop())
+  const probe = () => answersAt(addressOf(host, port))
   await step('Starting the app', async () => {
-    if (await service.answers(() => answersAt(addressOf(host, port)), readyWithinMs)) return
-    throw new Stop('The app did not start: what it printed above says why.')
+    if (await service.answers(probe, readyWithinMs)) return
+    throw new Stop('The app did not start: what it printed says why.')
   })
-  return service
+  return { keepAlive: () => service.keepAlive(probe) }
 }
 
 /** Where this machine itself reaches the app. */
-export function addressOf(host: string, port: number): string {
+function addressOf(host: string, port: number): string {
   const reachable = host === '0.0.0.0' ? '127.0.0.1' : host === '::' ? '::1' : host
   return `http://${reachable.includes(':') ? `[${reachable}]` : reachable}:${port}`
 }

@@ -5,7 +5,6 @@ import { step } from '../setup/progress.mjs'
 import { runScript } from '../setup/script'
 import { secretsOf } from '../setup/secrets'
 import { endLeftovers } from '../setup/service'
-import type { Service } from '../setup/service'
 import { Stop } from '../setup/stop.mjs'
 import { appEnvironment, buildWhenStale, startApp } from './app'
 import { readOptions } from './options'
@@ -33,7 +32,7 @@ export async function start({ lock, leftovers, flags }: Beginning): Promise<numb
 
   const secrets = secretsOf(directory)
   const database = options.databaseUrl ? undefined : await ownDatabase(lock, directory, secrets.databasePassword)
-  const databaseUrl = options.databaseUrl ?? database?.url ?? ''
+  const databaseUrl = options.databaseUrl ?? database?.url() ?? ''
   const env = appEnvironment(process.env, { ...options, databaseUrl, authSecret: secrets.authSecret })
 
   await runScript('Bringing the tables up to date', 'scripts/migrate.ts', env)
@@ -42,22 +41,12 @@ export async function start({ lock, leftovers, flags }: Beginning): Promise<numb
   const app = await startApp({ ...options, env, log: 'inherit', record: (pid) => lock.addChild('app', pid) })
   lock.announce(options.origin)
   welcome(options, signIns)
-  return untilGivenUp(database ? [app, database.service] : [app])
+  const watched = [app.keepAlive(), ...(database ? [database.keepAlive()] : [])]
+  await Promise.race(watched)
+  throw new Stop('Something Longpoint needs keeps ending. Everything was stopped; what was printed above says why.')
 }
 
-async function ownDatabase(lock: Lock, directory: string, password: string) {
+function ownDatabase(lock: Lock, directory: string, password: string) {
   const record = (pid: number) => lock.addChild('mariadb', pid)
-  const { service, url } = await startMariadb({ directory, password, reach: 'one', record })
-  return { service, url: url() }
-}
-
-/** Restart what dies. Ends, with 1, only when something keeps dying. */
-function untilGivenUp(services: Service[]): Promise<number> {
-  return new Promise((resolve) => {
-    for (const service of services)
-      service.keepAlive((name) => {
-        process.stderr.write(`${name} keeps ending. Stopping everything: what it printed above says why.\n`)
-        resolve(1)
-      })
-  })
+  return startMariadb({ directory, password, reach: 'one', record })
 }

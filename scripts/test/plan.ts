@@ -1,7 +1,7 @@
 import { Stop } from '../setup/stop.mjs'
 
 /** In the order they run: what is quick to tell comes first. */
-export const suites = ['unit', 'proof', 'api', 'browser', 'faults'] as const
+const suites = ['unit', 'proof', 'api', 'browser', 'faults'] as const
 export type Suite = (typeof suites)[number]
 
 export interface Plan {

@@ -2,6 +2,7 @@ import { spawn } from 'node:child_process'
 import { existsSync, readFileSync, rmSync } from 'node:fs'
 import path from 'node:path'
 import { defer } from '../setup/cleanup.mjs'
+import { endGroup } from '../setup/run.mjs'
 import type { Suite } from './plan'
 import { countSuite } from './totals'
 import type { Totals, VitestReport } from './totals'
@@ -19,13 +20,10 @@ export async function runSuite(suite: Suite, env: NodeJS.ProcessEnv, directory: 
 
 function watch(args: readonly string[], env: NodeJS.ProcessEnv): Promise<number> {
   return new Promise((resolve) => {
-    const child = spawn(process.execPath, args, { stdio: ['ignore', 'inherit', 'inherit'], env })
-    const gone = new Promise<void>((left) => child.once('exit', () => left()))
-    const forget = defer(async () => {
-      child.kill('SIGTERM')
-      await gone
-    })
-    child.once('error', () => resolve(1))
-    child.once('exit', (code) => void gone.then(forget).then(() => resolve(code ?? 1)))
+    const child = spawn(process.execPath, args, { stdio: ['ignore', 'inherit', 'inherit'], detached: true, env })
+    const forget = defer(() => endGroup(child))
+    const end = (code: number) => void forget().then(() => resolve(code))
+    child.once('error', () => end(1))
+    child.once('exit', (code) => end(code ?? 1))
   })
 }
