@@ -16,7 +16,7 @@ export function typedText(name: string, longest: number) {
 export function optionalText(name: string, longest: number) {
   return z
     .string({ error: `${name} is missing.` })
-    .max(longest, { message: `${name} is longer than ${longest} characters.` })
+    .max(longest, { message: `${name} may have at most ${longest} characters.` })
     .refine((text) => !loneSurrogate.test(text), { message: `${name} holds half a character.` })
 }
 
