@@ -1,20 +1,12 @@
 import type { ReactNode } from 'react'
+import { signalColours, type SignalWord } from './caution-word'
 import { classNames } from './class-names'
-
-export type SignalWord = 'danger' | 'warning' | 'caution' | 'notice'
-
-const colours: Record<SignalWord, string> = {
-  danger: 'bg-signal-danger text-white',
-  warning: 'bg-signal-warning text-black',
-  caution: 'bg-signal-caution text-black',
-  notice: 'bg-signal-notice text-white',
-}
 
 /** Signal panel in the manner of ANSI Z535: the word, its colour, the sentence. A notice has no alert sign. */
 export function CautionPanel({ signal, children, className }: { signal: SignalWord; children: ReactNode; className?: string }) {
   return (
     <aside aria-label={signal} className={classNames('caution rounded-[3px] border-2 border-ink bg-field', className)}>
-      <p className={classNames('flex items-center gap-2 border-b-2 border-ink px-3.5 py-1 font-head text-xl font-semibold tracking-[.06em]', colours[signal])}>
+      <p className={classNames('flex items-center gap-2 border-b-2 border-ink px-3.5 py-1 font-head text-xl font-semibold tracking-[.06em]', signalColours[signal])}>
         {signal !== 'notice' && <AlertSign />}
         {signal.toUpperCase()}
       </p>

@@ -1,0 +1,52 @@
+import type { Metadata } from 'next'
+import Link from 'next/link'
+import { notFound } from 'next/navigation'
+import { CalculatorScreen } from '@/components/calculator/calculator-screen'
+import { sharedInputs, type Related } from '@/components/calculator/related'
+import { Sources } from '@/components/calculator/sources'
+import { stageName } from '@/components/calculator/stages'
+import { typesetAhead } from '@/components/calculator/typeset-ahead'
+import type { AnyCalculator } from '@/lib/calculators/define'
+import { calculatorIds, isCalculatorId, loadCalculator } from '@/lib/calculators/load'
+
+interface Props {
+  params: Promise<{ id: string }>
+}
+
+export const dynamicParams = false
+
+export const generateStaticParams = () => calculatorIds.map((id) => ({ id }))
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { id } = await params
+  if (!isCalculatorId(id)) return {}
+  const { name, lede } = await loadCalculator(id)
+  return { title: name, description: lede }
+}
+
+/** The calculators that this one names and that exist. */
+const relatedOf = ({ related, inputs }: AnyCalculator): Promise<Related[]> =>
+  Promise.all(
+    related.filter(isCalculatorId).map(async (id) => {
+      const other = await loadCalculator(id)
+      return { id, name: other.name, asks: other.asks, shares: sharedInputs(inputs, other.inputs) }
+    }),
+  )
+
+export default async function CalculatorPage({ params }: Props) {
+  const { id } = await params
+  if (!isCalculatorId(id)) notFound()
+  const calculator = await loadCalculator(id)
+  return (
+    <article className="calculator">
+      <p className="crumb">
+        <Link href="/handbook">Handbook</Link> · {stageName(calculator.stage)}
+      </p>
+      <h1>{calculator.name}</h1>
+      <p className="lede">{calculator.lede}</p>
+      <CalculatorScreen id={id} typeset={typesetAhead(calculator)} related={await relatedOf(calculator)}>
+        <Sources sources={calculator.sources} basis={calculator.basis} />
+      </CalculatorScreen>
+    </article>
+  )
+}

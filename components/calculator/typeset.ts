@@ -1,0 +1,24 @@
+import katex from 'katex'
+import { create, parseDependencies, type MathNode } from 'mathjs/number'
+import type { AnyCalculator } from '@/lib/calculators/define'
+
+/** A formula's name in TeX: the entry's own symbol, or the name upright. */
+const symbolsOf = ({ inputs, outputs }: Pick<AnyCalculator, 'inputs' | 'outputs'>) => {
+  const symbols = new Map<string, string>()
+  for (const [name, field] of [...Object.entries(inputs), ...Object.entries(outputs)]) {
+    if ('symbol' in field && typeof field.symbol === 'string') symbols.set(name, field.symbol)
+  }
+  return (name: string) => symbols.get(name) ?? `\\mathrm{${name.replace(/_/g, '\\_')}}`
+}
+
+const { parse } = create(parseDependencies ?? {})
+
+/** Formulas in math syntax as MathML, which browsers set by themselves: no style sheet, no font, read aloud as mathematics. */
+export function typesetter(calculator: Pick<AnyCalculator, 'inputs' | 'outputs'>): (formula: string) => string {
+  const symbol = symbolsOf(calculator)
+  const handler = (node: MathNode & { name?: string }) => (node.type === 'SymbolNode' && node.name !== undefined ? symbol(node.name) : undefined)
+  return (formula) => {
+    const tex = parse(formula).toTex({ parenthesis: 'auto', implicit: 'hide', handler })
+    return katex.renderToString(tex, { output: 'mathml', throwOnError: true, strict: 'error' })
+  }
+}

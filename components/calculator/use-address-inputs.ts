@@ -1,0 +1,60 @@
+'use client'
+
+import { useCallback, useMemo, useSyncExternalStore } from 'react'
+import type { Fields } from '@/lib/calculators/fields'
+import { readAddress, writeAddress, type RawInputs } from './address'
+
+/** Browsers refuse an address that changes at every keystroke; the page follows at once, the address a moment later. */
+const settleMs = 250
+
+const listeners = new Set<() => void>()
+let ahead: { path: string; search: string } | null = null
+let timer: ReturnType<typeof setTimeout> | undefined
+
+/** What was typed on a page that has been left meanwhile is none of this page's. */
+const searchNow = () => (ahead?.path === location.pathname ? ahead.search : location.search)
+
+function settle(): void {
+  clearTimeout(timer)
+  if (ahead?.path === location.pathname) history.replaceState(history.state, '', `${ahead.path}${ahead.search}${location.hash}`)
+  ahead = null
+}
+
+function change(search: string): void {
+  ahead = { path: location.pathname, search }
+  clearTimeout(timer)
+  timer = setTimeout(settle, settleMs)
+  for (const listener of listeners) listener()
+}
+
+function subscribe(listener: () => void): () => void {
+  const moved = () => {
+    ahead = null
+    listener()
+  }
+  listeners.add(listener)
+  window.addEventListener('popstate', moved)
+  window.addEventListener('pagehide', settle)
+  // A tap on a link leaves before the moment is over: the address that Back returns to must be whole.
+  document.addEventListener('click', settle, true)
+  return () => {
+    listeners.delete(listener)
+    window.removeEventListener('popstate', moved)
+    window.removeEventListener('pagehide', settle)
+    document.removeEventListener('click', settle, true)
+  }
+}
+
+/**
+ * Inputs that live in the address bar, as typed: a link or Back brings them back. A page rendered ahead of its reader
+ * shows the example, and takes the address's numbers before the first paint that follows.
+ */
+export function useAddressInputs(fields: Fields, example: RawInputs): [RawInputs, (change: RawInputs) => void] {
+  const search = useSyncExternalStore(subscribe, searchNow, () => '')
+  const raw = useMemo(() => readAddress(fields, search, example), [fields, search, example])
+  const set = useCallback(
+    (changed: RawInputs) => change(writeAddress(fields, { ...readAddress(fields, searchNow(), example), ...changed })),
+    [fields, example],
+  )
+  return [raw, set]
+}

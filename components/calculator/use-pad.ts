@@ -1,0 +1,45 @@
+'use client'
+
+import { useState } from 'react'
+import { pressKey, setFraction, type PadKey } from './pad-text'
+
+export interface PadState {
+  /** Name of the row that the pad writes into. */
+  active: string | undefined
+  /** The reader asked for the device's own keyboard. */
+  keyboard: boolean
+  activate: (name: string) => void
+  press: (key: PadKey) => void
+  fraction: (divisions: number, den: number) => void
+  askKeyboard: () => void
+}
+
+interface PadRows {
+  names: readonly string[]
+  textOf: (name: string) => string
+  write: (name: string, text: string) => void
+}
+
+/** Which row the pad writes into, and what its keys do there. The first key in a freshly chosen row starts over. */
+export function usePad({ names, textOf, write }: PadRows): PadState {
+  const [chosen, setChosen] = useState<string | undefined>(undefined)
+  const [fresh, setFresh] = useState(true)
+  const [keyboard, setKeyboard] = useState(false)
+  const active = chosen !== undefined && names.includes(chosen) ? chosen : names[0]
+  const edit = (next: (text: string) => string) => {
+    if (active === undefined) return
+    write(active, next(textOf(active)))
+    setFresh(false)
+  }
+  return {
+    active,
+    keyboard,
+    activate: (name) => {
+      setFresh(name !== active || chosen === undefined)
+      setChosen(name)
+    },
+    press: (key) => edit((text) => pressKey(text, key, fresh)),
+    fraction: (divisions, den) => edit((text) => setFraction(text, divisions, den)),
+    askKeyboard: () => setKeyboard(true),
+  }
+}
