@@ -7,7 +7,16 @@ function asDrawing<Given, Solved>({ draw }: { draw: Drawing<Given, Solved> }): D
 
 /** One line a drawing, named as its calculator. */
 const drawings = {
+  'cut-list': () => import('./cut-list').then(asDrawing),
+  'field-check': () => import('./field-check').then(asDrawing),
+  handrail: () => import('./handrail').then(asDrawing),
+  'knuckle-height': () => import('./knuckle-height').then(asDrawing),
+  'long-short-point': () => import('./long-short-point').then(asDrawing),
   miter: () => import('./miter').then(asDrawing),
+  'nosing-line': () => import('./nosing-line').then(asDrawing),
+  pitch: () => import('./pitch').then(asDrawing),
+  'saw-dial': () => import('./saw-dial').then(asDrawing),
+  'tape-math': () => import('./tape-math').then(asDrawing),
 } satisfies Record<string, () => Promise<Drawing>>
 
 export const drawingIds = Object.keys(drawings) as (keyof typeof drawings)[]

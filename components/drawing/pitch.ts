@@ -1,0 +1,41 @@
+import type { Drawing, LabelRequest, Show } from '@/lib/drawing/sketch'
+import { angleArc, outline, path, spot } from '@/lib/drawing/strokes'
+import { degrees, length, number, plain, word } from '@/lib/drawing/text'
+import type { PitchAnswer } from '@/lib/trade/pitch'
+import { steps } from './steps'
+
+/** Wider than this the triangle spans a whole flight, whose treads were not counted. */
+const oneTread = 24
+
+/** A right triangle laid on the nosing line: rise, run and rake of the very numbers. */
+export const draw: Drawing<Record<string, unknown>, PitchAnswer> = (_given, solved, show) => {
+  const { rise, run, pitch } = solved
+  const before = run <= oneTread ? [path('ghost', steps({ x: -run, y: -rise }, 3, rise, run))] : []
+  return {
+    strokes: [
+      ...before,
+      outline('object', [spot(0, 0), spot(run, 0), spot(run, rise)], 'face'),
+      path('dim', [spot(run, 0, -14, 0), spot(run, 0, -14, 14), spot(run, 0, 0, 14)], { passable: true }),
+      ...(pitch > 0.5 ? [angleArc(spot(0, 0), 92, 0, pitch)] : []),
+    ],
+    labels: labelsOf(solved, show),
+    says: `Rise ${plain([length(rise, show)])}, run ${plain([length(run, show)])}, rake ${plain([length(solved.rake, show)])}: pitch ${plain([degrees(pitch, 2)])}, ${solved.inPer12.toFixed(2)} in 12.`,
+  }
+}
+
+function labelsOf({ rise, run, rake, pitch, inPer12 }: PitchAnswer, show: Show): LabelRequest[] {
+  const corner = spot(run, rise)
+  return [
+    { kind: 'dimension', text: [[...length(rake, show), word(' rake')]], size: 'number', from: spot(0, 0), to: corner, side: 'left', offset: 30, required: true },
+    { kind: 'dimension', text: [[...length(rise, show), word(' rise')]], size: 'number', from: spot(run, 0), to: corner, side: 'right', offset: 30, required: true },
+    { kind: 'dimension', text: [[...length(run, show), word(' run')]], size: 'number', from: spot(0, 0), to: spot(run, 0), side: 'right', offset: 30, required: true },
+    {
+      kind: 'at', size: 'answer', required: true, gap: 10,
+      text: [degrees(pitch, 2, 'cut'), [number(inPer12.toFixed(2), 'quiet'), word(' in 12')]],
+      spot: arcMiddle(pitch), prefer: [pitch / 2, 0, -30, -90],
+    },
+  ]
+}
+
+const arcMiddle = (pitch: number) =>
+  spot(0, 0, 92 * Math.cos((pitch * Math.PI) / 360), 92 * Math.sin((pitch * Math.PI) / 360))
