@@ -1,6 +1,13 @@
 import type { QuantityField, Unit, WholeField } from './fields'
 
-const unitWords: Partial<Record<Unit, string>> = { deg: '°', in: ' in', 'in/ft': ' in per ft', '%': ' %', mm: ' mm', lb: ' lb' }
+const unitWords: Partial<Record<Unit, string>> = {
+  deg: '°',
+  in: ' in',
+  'in/ft': ' in per ft',
+  '%': ' %',
+  mm: ' mm',
+  lb: ' lb',
+}
 
 const withUnit = (value: number, unit: Unit) => `${Number(value.toPrecision(6))}${unitWords[unit] ?? ''}`
 

@@ -10,8 +10,10 @@ const dials: readonly number[] = [0.25, 0.5, 1]
 export function readPrecision(asked: { tape?: number; dial?: number } = {}): Precision | Fault[] {
   const { tape = defaultPrecision.tape, dial = defaultPrecision.dial } = asked
   const faults: Fault[] = []
-  if (!tapes.includes(tape)) faults.push({ field: 'precision.tape', message: `The tape is one of ${tapes.join(', ')}.` })
-  if (!dials.includes(dial)) faults.push({ field: 'precision.dial', message: `The dial is one of ${dials.join(', ')}.` })
+  if (!tapes.includes(tape))
+    faults.push({ field: 'precision.tape', message: `The tape is one of ${tapes.join(', ')}.` })
+  if (!dials.includes(dial))
+    faults.push({ field: 'precision.dial', message: `The dial is one of ${dials.join(', ')}.` })
   return faults.length > 0 ? faults : ({ tape, dial } as Precision)
 }
 

@@ -77,12 +77,18 @@ export interface CalculatorEntry<I, O extends object> {
   basis: string
 }
 
-export interface Calculator<F extends Fields = Fields, O extends object = object> extends CalculatorEntry<ValuesOf<F>, O> {
+export interface Calculator<F extends Fields = Fields, O extends object = object> extends CalculatorEntry<
+  ValuesOf<F>,
+  O
+> {
   inputs: F
 }
 
 /** An entry as the engine handles it: values by name, nothing known beyond the fields. */
-export type AnyCalculator = Omit<Calculator, 'solve' | 'precisionOf' | 'warn' | 'shown' | 'steps' | 'cautions' | 'answer' | 'exactAnswer' | 'glance' | 'outputs'> & {
+export type AnyCalculator = Omit<
+  Calculator,
+  'solve' | 'precisionOf' | 'warn' | 'shown' | 'steps' | 'cautions' | 'answer' | 'exactAnswer' | 'glance' | 'outputs'
+> & {
   outputs: Readonly<Record<string, Output>>
   answer: string
   exactAnswer?: string

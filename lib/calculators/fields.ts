@@ -72,20 +72,24 @@ export interface Fields {
 }
 
 type Settled<F> = F extends { fallback: null } ? null : never
-type Raw<F> = F extends ChoiceField<infer T>
-  ? T
-  : F extends ListField<infer I>
-    ? ValueOf<I>[]
-    : F extends GroupField<infer G>
-      ? ValuesOf<G>
-      : F extends FormsField<infer A>
-        ? ValuesOf<A[number]>
-        : number
+type Raw<F> =
+  F extends ChoiceField<infer T>
+    ? T
+    : F extends ListField<infer I>
+      ? ValueOf<I>[]
+      : F extends GroupField<infer G>
+        ? ValuesOf<G>
+        : F extends FormsField<infer A>
+          ? ValuesOf<A[number]>
+          : number
 export type ValueOf<F> = Raw<F> | Settled<F>
 /** What solve receives for these fields: every key present, left-out ones at their fallback. */
 export type ValuesOf<G extends Fields> = G extends Fields ? { [K in keyof G]: ValueOf<G[K]> } : never
 
-type Extra<T extends Common> = Omit<T, 'kind' | 'label' | 'unit' | 'options' | 'of' | 'fields' | 'forms' | 'least' | 'most'>
+type Extra<T extends Common> = Omit<
+  T,
+  'kind' | 'label' | 'unit' | 'options' | 'of' | 'fields' | 'forms' | 'least' | 'most'
+>
 type RangedExtra = Extra<QuantityField> & Pick<Ranged, 'least' | 'most'>
 /** Of what is said besides, the types need to know only whether null stands for left out. */
 type Nullable<E> = E extends { fallback: null } ? { fallback: null } : unknown

@@ -35,9 +35,21 @@ export interface Outputs {
 type Extra = Pick<OutputValue, 'hint' | 'symbol'>
 
 /** A length, shown to the tape. */
-export const onTape = (label: string, extra?: Extra): OutputValue => ({ kind: 'value', label, unit: 'in', round: 'tape', ...extra })
+export const onTape = (label: string, extra?: Extra): OutputValue => ({
+  kind: 'value',
+  label,
+  unit: 'in',
+  round: 'tape',
+  ...extra,
+})
 /** An angle, shown to the dial. */
-export const onDial = (label: string, extra?: Extra): OutputValue => ({ kind: 'value', label, unit: 'deg', round: 'dial', ...extra })
+export const onDial = (label: string, extra?: Extra): OutputValue => ({
+  kind: 'value',
+  label,
+  unit: 'deg',
+  round: 'dial',
+  ...extra,
+})
 /** A number shown to so many decimals in its unit. */
 export const toDecimals = (label: string, unit: Unit, decimals: number, extra?: Extra): OutputValue => ({
   kind: 'value',
@@ -46,8 +58,20 @@ export const toDecimals = (label: string, unit: Unit, decimals: number, extra?: 
   round: { decimals },
   ...extra,
 })
-export const words = (label: string, extra?: Extra): OutputValue => ({ kind: 'value', label, unit: 'text', round: 'exact', ...extra })
-export const flag = (label: string, extra?: Extra): OutputValue => ({ kind: 'value', label, unit: 'flag', round: 'exact', ...extra })
+export const words = (label: string, extra?: Extra): OutputValue => ({
+  kind: 'value',
+  label,
+  unit: 'text',
+  round: 'exact',
+  ...extra,
+})
+export const flag = (label: string, extra?: Extra): OutputValue => ({
+  kind: 'value',
+  label,
+  unit: 'flag',
+  round: 'exact',
+  ...extra,
+})
 export const listOf = (label: string, of: Output): OutputList => ({ kind: 'list', label, of })
 export const groupOf = (label: string, of: Outputs): OutputGroup => ({ kind: 'group', label, of })
 export const shapeOf = (label: string): OutputShape => ({ kind: 'shape', label })

@@ -29,17 +29,22 @@ const isLeftOut = (raw: unknown) => raw === undefined || raw === null || raw ===
  */
 export function readInputs(fields: Fields, raw: unknown, precision: Precision): Reading {
   const reader: Reader = { precision, faults: [], notes: [] }
-  if (!isObject(raw)) return { ok: false, faults: [{ field: 'inputs', message: 'Send the inputs as an object of names and values.' }] }
+  if (!isObject(raw))
+    return { ok: false, faults: [{ field: 'inputs', message: 'Send the inputs as an object of names and values.' }] }
   const inputs = readFields(fields, raw, '', reader)
   return reader.faults.length > 0 ? { ok: false, faults: reader.faults } : { ok: true, inputs, notes: reader.notes }
 }
 
 function readFields(fields: Fields, raw: Record<string, unknown>, path: string, reader: Reader): Values {
   for (const name of Object.keys(raw)) {
-    if (!Object.hasOwn(fields, name)) reader.faults.push({ field: join(path, name), message: unknownName(name, fields) })
+    if (!Object.hasOwn(fields, name))
+      reader.faults.push({ field: join(path, name), message: unknownName(name, fields) })
   }
   return Object.fromEntries(
-    Object.entries(fields).map(([name, field]) => [name, readField(field, Object.hasOwn(raw, name) ? raw[name] : undefined, join(path, name), reader)]),
+    Object.entries(fields).map(([name, field]) => [
+      name,
+      readField(field, Object.hasOwn(raw, name) ? raw[name] : undefined, join(path, name), reader),
+    ]),
   )
 }
 
@@ -65,7 +70,8 @@ function readField(field: Field, raw: unknown, path: string, reader: Reader): un
 }
 
 function readNumber(field: QuantityField | WholeField, raw: unknown, path: string, reader: Reader): number | undefined {
-  if (typeof raw !== 'number' && typeof raw !== 'string') return fault(reader, path, `${field.label}: give a number or a measure as you would write it.`)
+  if (typeof raw !== 'number' && typeof raw !== 'string')
+    return fault(reader, path, `${field.label}: give a number or a measure as you would write it.`)
   const read = readQuantity(raw, field.unit)
   if ('misread' in read) return fault(reader, path, `${field.label}: ${read.misread}`)
   const refusal = outOfBounds(field, read.value)
@@ -84,7 +90,8 @@ function readChoice(field: ChoiceField, raw: unknown, path: string, reader: Read
 function readList(field: ListField, raw: unknown, path: string, reader: Reader): unknown[] | undefined {
   if (!Array.isArray(raw)) return fault(reader, path, `${field.label}: give a list.`)
   if (raw.length < field.least) return fault(reader, path, `${field.label}: give at least ${field.least}.`)
-  if (raw.length > field.most) return fault(reader, path, `${field.label}: at most ${field.most} can be worked at once.`)
+  if (raw.length > field.most)
+    return fault(reader, path, `${field.label}: at most ${field.most} can be worked at once.`)
   return raw.map((item: unknown, i) => readField(field.of, item, `${path}[${i}]`, reader))
 }
 
@@ -104,4 +111,5 @@ function fault(reader: Reader, field: string, message: string): undefined {
 
 const join = (path: string, name: string) => (path === '' ? name : `${path}.${name}`)
 const names = (fields: Fields) => Object.keys(fields).join(', ')
-const unknownName = (name: string, fields: Fields) => `There is no input “${name.slice(0, 40)}” here. Known: ${names(fields)}.`
+const unknownName = (name: string, fields: Fields) =>
+  `There is no input “${name.slice(0, 40)}” here. Known: ${names(fields)}.`

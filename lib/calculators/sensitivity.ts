@@ -35,7 +35,9 @@ export function sensitivityOf(calculator: AnyCalculator, given: Values, precisio
       if (!unit || typeof value !== 'number') return []
       const moved = [value - slip[unit], value + slip[unit]].map((x) => at({ ...given, [input]: x }))
       const changes = moved.filter((x) => x !== undefined).map((x) => Math.abs(x - here))
-      return changes.length === 0 ? [] : [{ input, label: field.label, off: slip[unit], unit, change: Math.max(...changes) }]
+      return changes.length === 0
+        ? []
+        : [{ input, label: field.label, off: slip[unit], unit, change: Math.max(...changes) }]
     })
     .sort((a, b) => b.change - a.change)
 }

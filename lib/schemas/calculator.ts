@@ -59,7 +59,9 @@ export function outputsSchema(outputs: Outputs): z.ZodType {
 function outputSchema(output: Output): z.ZodType {
   switch (output.kind) {
     case 'value':
-      return valueSchema(output.unit).nullish().describe(output.unit === 'text' || output.unit === 'flag' ? output.label : `${output.label}, ${output.unit}`)
+      return valueSchema(output.unit)
+        .nullish()
+        .describe(output.unit === 'text' || output.unit === 'flag' ? output.label : `${output.label}, ${output.unit}`)
     case 'list':
       return z.array(outputSchema(output.of)).nullish().describe(output.label)
     case 'group':
@@ -96,6 +98,7 @@ function outline(output: Output): Outline {
   const { label } = output
   if (output.kind === 'value') return { label, unit: output.unit }
   if (output.kind === 'list') return { label, list: outline(output.of) }
-  if (output.kind === 'group') return { label, group: Object.fromEntries(Object.entries(output.of).map(([name, of]) => [name, outline(of)])) }
+  if (output.kind === 'group')
+    return { label, group: Object.fromEntries(Object.entries(output.of).map(([name, of]) => [name, outline(of)])) }
   return { label }
 }

@@ -82,7 +82,10 @@ function pathsOf(calculator: AnyCalculator) {
         tags,
         requestBody: body,
         responses: {
-          '200': { description: 'One page, PDF', content: { 'application/pdf': { schema: { type: 'string', format: 'binary' } } } },
+          '200': {
+            description: 'One page, PDF',
+            content: { 'application/pdf': { schema: { type: 'string', format: 'binary' } } },
+          },
           ...refusals,
         },
       },
@@ -97,7 +100,8 @@ export function openapi(calculators: readonly AnyCalculator[]) {
     info: {
       title: 'Longpoint calculators',
       version: '1',
-      description: 'Shop calculators for stair rail work. Lengths in inches and angles in degrees unless a unit says otherwise. The adopted local code and a licensed professional decide.',
+      description:
+        'Shop calculators for stair rail work. Lengths in inches and angles in degrees unless a unit says otherwise. The adopted local code and a licensed professional decide.',
       license: { name: 'MIT', identifier: 'MIT' },
     },
     servers: [{ url: '/' }],

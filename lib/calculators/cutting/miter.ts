@@ -44,7 +44,8 @@ export const miter = defineCalculator({
   glance: ['sawSquareIs0', 'longPointFace', 'setback', 'included'],
   solve({ slopeBelow, slopeAbove, depth, dialStep }) {
     const bend = Math.abs(slopeBelow - slopeAbove)
-    if (bend > 90) return refuse('slopeAbove', 'The bars bend more than 90°, past what a saw can halve: check both slopes.')
+    if (bend > 90)
+      return refuse('slopeAbove', 'The bars bend more than 90°, past what a saw can halve: check both slopes.')
     return miterAt(slopeBelow, slopeAbove, depth, dialStep)
   },
   precisionOf: ({ dialStep }, asked) => ({ ...asked, dial: dialStep }),
@@ -57,7 +58,10 @@ export const miter = defineCalculator({
     bend: { says: 'The bend is the turn between the two slopes.', formula: 'abs(slopeBelow - slopeAbove)' },
     miter: { says: 'The joint face splits the bend in two; each piece takes half.', formula: 'bend / 2' },
     included: { says: 'What is left of a straight line is the angle to hold.', formula: '180 - bend' },
-    setback: { says: 'The bar is as deep as it is, so the long point stands this far past the short point.', formula: 'depth * tan(miter)' },
+    setback: {
+      says: 'The bar is as deep as it is, so the long point stands this far past the short point.',
+      formula: 'depth * tan(miter)',
+    },
   },
   steps: (_given, { sawSquareIs0, longPointFace }) => [
     { says: 'Round once, to the step of the dial.', value: `${sawSquareIs0}°` },
@@ -67,11 +71,28 @@ export const miter = defineCalculator({
     },
   ],
   cautions: [
-    { signal: 'caution', text: 'Halve the bend, not the pitch. They agree only where one side is level.', beside: 'slopeAbove', when: ({ slopeBelow, slopeAbove }) => slopeBelow !== 0 && slopeAbove !== 0 },
-    { signal: 'notice', text: 'A top knuckle is long on top, a bottom knuckle long underneath. Mark UP on the bar before it goes in the saw.', beside: 'longPointFace' },
-    { signal: 'caution', text: 'Dry-fit on the stair before you weld out. The adopted local code and a licensed professional decide heights and loads.' },
+    {
+      signal: 'caution',
+      text: 'Halve the bend, not the pitch. They agree only where one side is level.',
+      beside: 'slopeAbove',
+      when: ({ slopeBelow, slopeAbove }) => slopeBelow !== 0 && slopeAbove !== 0,
+    },
+    {
+      signal: 'notice',
+      text: 'A top knuckle is long on top, a bottom knuckle long underneath. Mark UP on the bar before it goes in the saw.',
+      beside: 'longPointFace',
+    },
+    {
+      signal: 'caution',
+      text: 'Dry-fit on the stair before you weld out. The adopted local code and a licensed professional decide heights and loads.',
+    },
   ],
-  sources: [{ says: 'The miter halves the angle between two bars of the same depth.', where: 'common practice (geometry), no published source' }],
+  sources: [
+    {
+      says: 'The miter halves the angle between two bars of the same depth.',
+      where: 'common practice (geometry), no published source',
+    },
+  ],
   related: ['pitch', 'long-short-point', 'saw-dial', 'handrail'],
   basis: 'common practice (geometry)',
 })
