@@ -8,8 +8,8 @@ const fonts = {
   word: 'barlow-condensed-latin-600-normal.woff2',
 }
 
-// Printable ASCII, and what trade labels add to it: degree, dash, minus, times, fraction slash, middle dot, primes.
-const letters = [...Array(95).keys()].map((i) => String.fromCharCode(32 + i)).concat([...'°–−×⁄·′″'])
+// Printable ASCII, and what trade labels add to it: degree, dash, minus, times, fraction slash, middle dot, primes, quotes.
+const letters = [...Array(95).keys()].map((i) => String.fromCharCode(32 + i)).concat([...'°–−×⁄·′″’“”'])
 
 function advances(file: string): Record<string, number> {
   const doc = new PDFDocument()

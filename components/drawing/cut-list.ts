@@ -118,11 +118,13 @@ function rowLabels({ stock, kerf }: Given, row: Row, index: number, show: Show):
   const pieces = laidPieces(row, kerf).map(({ mark, size, topStart, topEnd, underStart, underEnd }): LabelRequest => {
     const from = spot(Math.max(topStart, underStart), 0, 0, y)
     const to = spot(Math.min(topEnd, underEnd), 0, 0, y)
-    const text = [[...(mark ? [word(`${mark} `, 'text')] : []), ...length(size, show)]]
-    return { kind: 'along', text, size: 'note', from, to, side: 'within', gap: 0, required: false, worth: 0.4, part: mark }
+    const shared = { kind: 'along', size: 'note', from, to, side: 'within', gap: 0, required: false, worth: 0.4, part: mark } as const
+    const name = mark ? [word(mark, 'text')] : []
+    const whole = [[...name, ...(mark ? [word(' ')] : []), ...length(size, show)]]
+    return { ...shared, text: whole, otherwise: mark ? { ...shared, text: [name] } : undefined }
   })
   return [
-    { kind: 'at', text: [name], size: 'note', spot: spot(0, 0, 0, y), prefer: [180], gap: 10, required: true, leader: false },
+    { kind: 'at', text: [name], size: 'note', spot: spot(0, 0, 0, y), prefer: [180], gap: 10, reach: 10, required: true, leader: false },
     ...pieces,
     ...(row.drop > 0
       ? [{ kind: 'at', text: [[word('drop '), ...length(row.drop, show, 'quiet')]], size: 'note', spot: spot(stock, 0, 0, y - barHeight / 2), prefer: [-160, -165, -170], gap: 5, reach: 40, required: false, worth: 0.5, leader: false } as const]

@@ -41,10 +41,17 @@ function strokesOf({ depth, miterA, miterB, faceA, faceB }: PieceGiven, { topA, 
     : [outline('object', [topA, topB, underB, underA], 'face')]
   return [
     ...bars,
-    path('centre', [nudged(spot((topA.x + underA.x) / 2, depth / 2), 180, 16), nudged(spot((topB.x + underB.x) / 2, depth / 2), 0, 16)], { passable: true }),
+    ...centreStub(topA, underA, 180),
+    ...centreStub(topB, underB, 0),
     ...endStrokes(topA, underA, miterA ?? 0, faceA),
     ...endStrokes(topB, underB, miterB ?? 0, faceB),
   ]
+}
+
+/** The centre line where it leaves the end; inside the piece it would only be in the way. */
+function centreStub(top: Spot, under: Spot, way: number): Stroke[] {
+  const end = spot((top.x + under.x) / 2, (top.y + under.y) / 2)
+  return [path('centre', [end, nudged(end, way, 14)])]
 }
 
 function endStrokes(top: Spot, under: Spot, miter: number, face: EndFace): Stroke[] {
@@ -63,17 +70,17 @@ function labelsOf(given: PieceGiven, solved: PieceDimensions, show: Show, { topA
     { kind: 'dimension', text: [[...length(solved.underside, show), word(' underside')]], size: 'number', from: underA, to: underB, side: 'right', offset: 34, required: true },
     { kind: 'dimension', text: [[...length(solved.overall, show), word(' overall')]], size: 'number', from: spot(left.x, 0), to: spot(right.x, 0), side: 'right', offset: 78, required: true },
     ...(isMitered
-      ? [{ kind: 'dimension', text: [[...length(solved.centre, show), word(' centre')]], size: 'number', from: spot((topA.x + underA.x) / 2, given.depth), to: spot((topB.x + underB.x) / 2, given.depth), side: 'left', offset: 78, required: false } as const]
+      ? [{ kind: 'dimension', text: [[...length(solved.centre, show), word(' centre')]], size: 'number', from: spot((topA.x + underA.x) / 2, middle), to: spot((topB.x + underB.x) / 2, middle), side: 'left', offset: 90, required: false } as const]
       : []),
-    ...endLabel(spot(left.x, middle), given.miterA ?? 0, 180),
-    ...endLabel(spot(right.x, middle), given.miterB ?? 0, 0),
+    ...endLabel(spot((topA.x + underA.x) / 2, middle), given.miterA ?? 0, 0),
+    ...endLabel(spot((topB.x + underB.x) / 2, middle), given.miterB ?? 0, 180),
     { kind: 'at', text: [[...inchesOnly(given.depth, show), word(' deep')]], size: 'note', spot: nudged(spot(left.x, 0), -90, 20), prefer: [180, -150, -120], gap: 10, required: false },
   ]
 }
 
 function endLabel(end: Spot, miter: number, way: number): LabelRequest[] {
   const text = miter === 0 ? [[word('square')]] : [degrees(miter, 2, 'cut')]
-  return [{ kind: 'at', text, size: 'number', spot: end, prefer: [way, way + 30, way - 30], gap: 20, required: true, leader: false }]
+  return [{ kind: 'at', text, size: 'number', spot: end, prefer: [way, way + 180], gap: 12, reach: 60, required: true, leader: false }]
 }
 
 function saysOf(given: PieceGiven, solved: PieceDimensions, show: Show): string {

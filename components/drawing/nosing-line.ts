@@ -43,7 +43,7 @@ function labelsOf({ risers, rise, run }: Given, solved: NosingLine, show: Show):
       const isEnd = i === 0 || i === risers - 1
       return {
         kind: 'at', text: [[number(String(i + 1), isEnd ? 'text' : 'quiet')]], size: 'note', required: isEnd, worth: 0.5,
-        spot: spot(i * run, i * rise), prefer: isEnd ? [135, 110, 160, -45, 90, 180] : [-45, -60, 135], gap: 5, reach: isEnd ? 60 : 10, leader: isEnd,
+        spot: spot(i * run, i * rise), prefer: isEnd ? [135, 110, 160, -45, 90, 180] : [-45, -30, -60], gap: 5, reach: isEnd ? 60 : 8, leader: isEnd,
       }
     }),
   ]

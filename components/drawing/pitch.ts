@@ -2,7 +2,6 @@ import type { Drawing, LabelRequest, Show } from '@/lib/drawing/sketch'
 import { angleArc, outline, path, spot } from '@/lib/drawing/strokes'
 import { degrees, length, number, plain, word } from '@/lib/drawing/text'
 import type { PitchAnswer } from '@/lib/trade/pitch'
-import { steps } from './steps'
 
 /** Wider than this the triangle spans a whole flight, whose treads were not counted. */
 const oneTread = 24
@@ -10,7 +9,7 @@ const oneTread = 24
 /** A right triangle laid on the nosing line: rise, run and rake of the very numbers. */
 export const draw: Drawing<Record<string, unknown>, PitchAnswer> = (_given, solved, show) => {
   const { rise, run, pitch } = solved
-  const before = run <= oneTread ? [path('ghost', steps({ x: -run, y: -rise }, 3, rise, run))] : []
+  const before = run <= oneTread ? [path('ghost', [spot(-0.5 * run, -rise), spot(0, -rise), spot(0, 0)]), path('ghost', [spot(run, rise), spot(1.5 * run, rise)])] : []
   return {
     strokes: [
       ...before,

@@ -14,7 +14,7 @@ interface Solved {
 
 /** Px of the strip, and of a graduation by its own denominator: the eye finds a half by its length. */
 const stripHeight = 84
-const graduations: Readonly<Record<number, number>> = { 1: 54, 2: 40, 4: 31, 8: 24, 16: 17, 32: 12, 64: 8 }
+const graduations = { 1: 54, 2: 40, 4: 31, 8: 24, 16: 17, 32: 12, 64: 8 }
 const halfWindow = 8
 
 /** A strip of tape with the nearest mark, its two neighbours, and where the decimal really falls. */
@@ -29,7 +29,9 @@ export const draw: Drawing<Given, Solved> = (given, solved, show) => {
   return {
     strokes: [
       outline('tape', [spot(first, 0, -14), spot(last, 0, 14), spot(last, 0, 14, -stripHeight), spot(first, 0, -14, -stripHeight)], 'tape', { passable: true }),
+      shade(solved.nearest, den),
       ...marks,
+      ...[solved.nearest - 1 / den, solved.nearest + 1 / den].filter((x) => x >= 0).map((x) => path('ext', [spot(x, 0, 0, -graduations[1] - 4), spot(x, 0, 0, -stripHeight - 18)])),
       path('cut', [spot(given.decimalIn, 0, 0, 34), spot(given.decimalIn, 0, 0, 0)]),
     ],
     labels: labelsOf(given, solved, read, { first, last, isExact }),
@@ -37,22 +39,32 @@ export const draw: Drawing<Given, Solved> = (given, solved, show) => {
   }
 }
 
+/** The nearest mark stands in a shadow of its own. */
+function shade(x: number, den: number): Stroke {
+  const half = 0.42 / den
+  return outline('tape', [spot(x - half, 0), spot(x + half, 0), spot(x + half, 0, 0, -stripHeight), spot(x - half, 0, 0, -stripHeight)], 'shade', { passable: true })
+}
+
 function tapeOf(den: number): Show['tape'] {
   return den === 8 || den === 32 || den === 64 ? den : 16
 }
 
+type Division = keyof typeof graduations
+
 /** The largest division a mark belongs to: 8/16 is a half. */
-function ownDenominator(k: number, den: number): number {
+function ownDenominator(k: number, den: number): Division {
   let [n, d] = [k, den]
   while (d > 1 && n % 2 === 0) {
     n /= 2
     d /= 2
   }
-  return d
+  return isDivision(d) ? d : 16
 }
 
+const isDivision = (d: number): d is Division => d in graduations
+
 function markAt(k: number, den: number): Stroke {
-  const height = graduations[ownDenominator(k, den)] ?? 17
+  const height = graduations[ownDenominator(k, den)]
   return path('tape', [spot(k / den, 0, 0, -1), spot(k / den, 0, 0, -height)])
 }
 
@@ -70,7 +82,7 @@ function labelsOf({ decimalIn, den }: Given, { nearest, roundingError }: Solved,
   }
   for (const [side, value] of [[-120, nearest - 1 / den], [-60, nearest + 1 / den]] as const) {
     if (value < 0) continue
-    labels.push({ kind: 'at', text: [length(value, read)], size: 'number', spot: spot(value, 0, 0, -stripHeight), prefer: [side, -90], gap: 22, required: true })
+    labels.push({ kind: 'at', text: [length(value, read)], size: 'number', spot: spot(value, 0, 0, -stripHeight - 18), prefer: [side, -90], gap: 5, required: true })
   }
   return labels
 }

@@ -35,7 +35,8 @@ const shares = [1, 0.94, 0.88, 0.82, 0.76, 0.7, 0.63, 0.56, 0.49, 0.42, 0.35, 0.
 /** What it costs to leave out an optional label that does not say its own worth. */
 const usualWorth = 4
 /** A dimension that became a label on a leader says less. */
-const besideCost = 6
+const besideCost = 12
+const otherwiseCost = 0.3
 
 /** Fits a sketch to its paper, to scale, with no label on a line or on another. Pure and repeatable. */
 export function compose(sketch: Sketch, viewport: Viewport): Plate {
@@ -97,6 +98,13 @@ function attemptAt(projection: Projection, strokes: readonly Stroke[], labels: r
 }
 
 function place(request: LabelRequest, projection: Projection, field: Field): Placement | null {
+  const first = placeAsked(request, projection, field)
+  if (first || !request.otherwise) return first
+  const second = place(request.otherwise, projection, field)
+  return second && { ...second, cost: second.cost + otherwiseCost }
+}
+
+function placeAsked(request: LabelRequest, projection: Projection, field: Field): Placement | null {
   if (request.kind === 'at') return placeAt(request, projection, field)
   const wished = request.kind === 'dimension' ? placeDimension(request, projection, field) : placeAlong(request, projection, field)
   if (wished || !request.required) return wished

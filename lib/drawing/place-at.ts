@@ -15,11 +15,12 @@ export function placeAt(request: LabelAt, projection: Projection, field: Field):
   const spot = project(request.spot, projection)
   const scale = projection.textScale
   const reach = request.reach ?? (request.required ? 150 : 50)
+  const farWays = ways(request.prefer)
   for (const distance of distances(request.gap ?? 7, reach)) {
-    for (const [rank, way] of ways(request.prefer, distance).entries()) {
+    for (const [rank, way] of (distance < leaderFrom ? request.prefer : farWays).entries()) {
       const placement = tryAt(request, projection, field, spot, way, distance * scale)
       if (!placement) continue
-      const stray = rank < request.prefer.length ? rank * 0.2 : 2
+      const stray = rank < request.prefer.length ? rank * 0.2 : 4
       return { ...placement, cost: placement.cost + stray + distance / 14 }
     }
   }
@@ -35,8 +36,8 @@ function distances(gap: number, reach: number): number[] {
   return all
 }
 
-function ways(prefer: readonly number[], distance: number): readonly number[] {
-  if (distance < leaderFrom) return prefer
+/** Every way to try once a label needs a leader: the wished ones, then the others by how near they come to them. */
+function ways(prefer: readonly number[]): readonly number[] {
   const wanted = prefer[0] ?? 90
   const off = (way: number) => Math.abs(((way - wanted + 540) % 360) - 180)
   return [...prefer, ...everyWay.toSorted((a, b) => off(a) - off(b) || a - b)]

@@ -26,16 +26,14 @@ export interface Body {
 type Align = 'start' | 'middle' | 'end'
 
 /** One request is laid out once, though it is tried in hundreds of places. */
-const laid = new WeakMap<LabelRequest, Map<string, Body>>()
+const laid = new WeakMap<LabelRequest, { textScale: number } & Partial<Record<Align, Body>>>()
 
 /** A request's size on paper, its lines set to one side or centred. */
 export function bodyOf(request: LabelRequest, { textScale }: Projection, align: Align = 'middle'): Body {
-  const known = laid.get(request) ?? new Map<string, Body>()
-  laid.set(request, known)
-  const key = `${textScale} ${align}`
-  const body = known.get(key) ?? layBody(request, textScale, align)
-  known.set(key, body)
-  return body
+  const before = laid.get(request)
+  const known = before?.textScale === textScale ? before : { textScale }
+  if (known !== before) laid.set(request, known)
+  return (known[align] ??= layBody(request, textScale, align))
 }
 
 function layBody(request: LabelRequest, textScale: number, align: Align): Body {
@@ -55,7 +53,14 @@ function badgeOf(request: LabelAt | LabelAlong | Dimension) {
 /** The box of a body centred here; turn in degrees, clockwise as paper turns. */
 export function boxAt(body: Body, centre: Point, turn = 0): Box {
   const angle = (turn * Math.PI) / 180
-  return { ...centre, halfWidth: body.halfWidth, halfHeight: body.halfHeight, cos: Math.cos(angle), sin: Math.sin(angle) }
+  return {
+    x: centre.x,
+    y: centre.y,
+    halfWidth: body.halfWidth,
+    halfHeight: body.halfHeight,
+    cos: turn === 0 ? 1 : Math.cos(angle),
+    sin: turn === 0 ? 0 : Math.sin(angle),
+  }
 }
 
 /** Sets the words into their box: a disc centres its capital, a label starts at its first baseline. */

@@ -10,7 +10,7 @@ export interface Spot {
 
 /** What a line stands for; its width and colour follow. */
 export type Ink = 'object' | 'dim' | 'ext' | 'ghost' | 'post' | 'cut' | 'off' | 'centre' | 'hatch' | 'flag' | 'tape'
-export type Fill = 'face' | 'solid' | 'off-face' | 'tape' | 'ground'
+export type Fill = 'face' | 'solid' | 'off-face' | 'tape' | 'shade' | 'ground'
 export type LabelInk = 'text' | 'quiet' | 'cut' | 'off' | 'on-tape'
 
 interface Belongs {
@@ -42,6 +42,8 @@ interface Asked {
   required: boolean
   /** How much scale an optional label is worth, in hundredths of the largest. */
   worth?: number
+  /** What to say instead where this finds no room. */
+  otherwise?: LabelRequest
   part?: string
 }
 export type LabelSize = 'answer' | 'number' | 'note'
