@@ -6,6 +6,7 @@ import { createConnection } from 'mariadb'
 import { afterAll } from 'vitest'
 import { migrate } from '@/migrations/migrate'
 import { startMariadb } from '@/scripts/setup/mariadb'
+import { Stop } from '@/scripts/setup/stop.mjs'
 
 /**
  * A real MariaDB with an empty, migrated database for one test file. Import this first: whatever is imported after it
@@ -60,10 +61,12 @@ function given(address: string) {
 
 async function ownServer() {
   const directory = mkdtempSync(path.join(os.tmpdir(), 'longpoint-api-'))
-  const { stop: stopServer, url } = await startMariadb({ directory, password: randomBytes(12).toString('hex'), reach: 'all' })
-  const stop = async () => {
-    await stopServer()
-    rmSync(directory, { recursive: true, force: true })
+  const remove = () => rmSync(directory, { recursive: true, force: true })
+  try {
+    const { url, stop } = await startMariadb({ directory, password: randomBytes(12).toString('hex'), reach: 'all' })
+    return { url, stop: () => stop().then(remove) }
+  } catch (error) {
+    remove()
+    throw error instanceof Stop ? new Error(`${error.message}\n${error.detail ?? ''}`) : error
   }
-  return { url, stop }
 }
