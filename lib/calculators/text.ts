@@ -32,7 +32,9 @@ function textOfOne(output: Output, value: unknown, precision: Precision): Text {
   if (value === null || value === undefined) return null
   switch (output.kind) {
     case 'value':
-      return valueText(output, value, precision)
+      return Array.isArray(value)
+        ? value.map((item: unknown) => textOfOne(output, item, precision))
+        : valueText(output, value, precision)
     case 'list':
       return Array.isArray(value) ? value.map((item: unknown) => textOfOne(output.of, item, precision)) : null
     case 'group':
@@ -46,6 +48,7 @@ function textOfOne(output: Output, value: unknown, precision: Precision): Text {
 export function valueText(output: OutputValue, value: unknown, precision: Precision): string {
   if (typeof value === 'boolean') return value ? 'yes' : 'no'
   if (typeof value !== 'number') return String(value)
+  if (output.unit === 'text') return String(Number(value.toFixed(4)))
   if (output.round === 'tape') return showTape(value, precision.tape)
   if (output.round === 'dial') return showDial(value, precision.dial)
   const digits = output.round === 'exact' ? String(value) : value.toFixed(output.round.decimals)

@@ -59,9 +59,7 @@ export function outputsSchema(outputs: Outputs): z.ZodType {
 function outputSchema(output: Output): z.ZodType {
   switch (output.kind) {
     case 'value':
-      return valueSchema(output.unit)
-        .nullish()
-        .describe(output.unit === 'text' || output.unit === 'flag' ? output.label : `${output.label}, ${output.unit}`)
+      return manyOf(valueSchema(output.unit)).nullish().describe(labelWithUnit(output.label, output.unit))
     case 'list':
       return z.array(outputSchema(output.of)).nullish().describe(output.label)
     case 'group':
@@ -71,8 +69,13 @@ function outputSchema(output: Output): z.ZodType {
   }
 }
 
+/** A value may stand alone or as a row of marks. */
+const manyOf = (schema: z.ZodType) => z.union([schema, z.array(schema)])
+
+const labelWithUnit = (label: string, unit: string) => (unit === 'text' || unit === 'flag' ? label : `${label}, ${unit}`)
+
 function valueSchema(unit: string): z.ZodType {
-  if (unit === 'text') return z.string()
+  if (unit === 'text') return z.union([z.string(), z.number()])
   return unit === 'flag' ? z.boolean() : z.number()
 }
 
