@@ -74,8 +74,8 @@ export async function listRevisions(actor: Actor, jobId: string, sheet: number):
   })
   if (rows.length === 0) throw new NotFound()
   return rows.map((row) => {
-    const { author: by, job: _, ...plain } = row as CutSheet & Joined
-    return { ...plain, ...datesOf(plain), createdBy: by.name }
+    const { author: by, revision, note, measuredBy, measuredOn, ...dates } = row as CutSheet & Joined
+    return { revision, note, measuredBy, measuredOn, ...datesOf(dates), createdBy: by.name }
   })
 }
 

@@ -1,5 +1,5 @@
 import { User } from '@/models'
-import type { Actor } from './access-table'
+import type { Actor } from './access-actors'
 import { newJob, newSheet } from './jobs'
 import { newPerson, type Person } from './people'
 

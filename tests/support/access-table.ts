@@ -1,18 +1,6 @@
+import { actors, type Actor } from './access-actors'
 import type { Ground } from './access-ground'
 import { sheetForm } from './jobs'
-
-export const actors = [
-  'anonymous',
-  'owner',
-  'mate',
-  'apprentice',
-  'instructor',
-  'coordinator',
-  'foreigner',
-  'foreign coordinator',
-  'disabled',
-] as const
-export type Actor = (typeof actors)[number]
 
 /** How a route is asked, and the status each actor must get. */
 export interface Row {
