@@ -1,6 +1,7 @@
 'use client'
 
 import type { ReactNode } from 'react'
+import type { AnyCalculator } from '@/lib/calculators/define'
 import type { CalculatorId } from '@/lib/calculators/load'
 import { CautionPanel } from '../ui/caution-panel'
 import { CalculatorActions } from './actions'
@@ -21,12 +22,17 @@ interface CalculatorScreenProps {
   children?: ReactNode
 }
 
+/** True for a result that has no card of its own. */
+const isUnseen = ({ outputs, glance }: AnyCalculator, name: string) => outputs[name] !== undefined && !glance.includes(name)
+
 /** A calculator with all that belongs to its numbers. */
 export function CalculatorScreen({ id, typeset, related, children }: CalculatorScreenProps) {
   const bench = useBench(id)
   const { calculator, raw, answer, stale, asked, precision, cautions, preferences } = bench
   useLastUsed(id)
-  const standingAlone = cautions.filter(({ beside }) => beside === undefined || (calculator.outputs[beside] && !calculator.glance.includes(beside)))
+  // A phone's answer has no room for a sentence: what stands beside a result there stands under the bench.
+  const besideResults = cautions.filter(({ beside }) => beside !== undefined && calculator.glance.includes(beside))
+  const standingAlone = cautions.filter(({ beside }) => beside === undefined || isUnseen(calculator, beside))
   return (
     <>
       <Bench bench={bench}>
@@ -45,6 +51,11 @@ export function CalculatorScreen({ id, typeset, related, children }: CalculatorS
           {children}
         </div>
         <div className="below-side">
+          {besideResults.map(({ signal, text }) => (
+            <CautionPanel key={text} signal={signal} className="phone-only">
+              {text}
+            </CautionPanel>
+          ))}
           {standingAlone.map(({ signal, text }) => (
             <CautionPanel key={text} signal={signal}>
               {text}

@@ -26,7 +26,7 @@ export function InputField({ name, field, raw, set, marks, pad, phone, precision
   const fault = faultOf(marks, name)
   const below = (
     <>
-      {field.hint}
+      {field.hint && <span className="field-hint-text">{field.hint}</span>}
       <FieldMarks marks={marks} name={name} />
     </>
   )

@@ -1,9 +1,15 @@
 'use client'
 
-import type { PointerEvent } from 'react'
+import type { PointerEvent, ReactNode } from 'react'
 import type { PadKey } from './pad-text'
 
-const rows: readonly { key: PadKey; name: string; says?: string }[] = [
+const BackSign = () => (
+  <svg width="30" height="20" viewBox="0 0 30 20" aria-hidden="true" fill="none" stroke="currentColor" strokeWidth="2.4" className="inline">
+    <path d="M9 2h19v16H9L2 10zM14 6l8 8m0-8-8 8" />
+  </svg>
+)
+
+const rows: readonly { key: PadKey; name: ReactNode; says?: string }[] = [
   { key: '1', name: '1' },
   { key: '2', name: '2' },
   { key: '3', name: '3' },
@@ -15,7 +21,7 @@ const rows: readonly { key: PadKey; name: string; says?: string }[] = [
   { key: '7', name: '7' },
   { key: '8', name: '8' },
   { key: '9', name: '9' },
-  { key: 'back', name: '⌫', says: 'take the last one back' },
+  { key: 'back', name: <BackSign />, says: 'take the last one back' },
   { key: '.', name: '.', says: 'point' },
   { key: '0', name: '0' },
 ]

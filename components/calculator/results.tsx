@@ -34,7 +34,7 @@ export function Results({ calculator, answer, stale, precision, preferences, cau
           {cautions
             .filter(({ beside }) => beside === name)
             .map(({ signal, text }) => (
-              <small key={text} className="mt-1.5">
+              <small key={text} className="result-caution">
                 <CautionWord signal={signal} /> {text}
               </small>
             ))}

@@ -61,12 +61,12 @@ export function PreferencesFields() {
 /** Opens the dialog of preferences; says the unit in use. */
 export function PreferencesButton() {
   const dialog = useRef<HTMLDialogElement>(null)
-  const { units: unit } = usePreferences()
+  const { units: unit, tape } = usePreferences()
   return (
     <>
       <button type="button" className="nav-link cursor-pointer" onClick={() => dialog.current?.showModal()} aria-haspopup="dialog">
         <span className="sr-only">Tape, saw and screen. Lengths in </span>
-        {unit === 'in' ? 'in / tape' : 'mm'}
+        {unit === 'in' ? `in · 1/${tape}` : 'mm'}
       </button>
       <dialog ref={dialog} className="sheet-dialog" aria-labelledby="preferences-title">
         <h2 id="preferences-title" className="mb-4 text-3xl">
