@@ -18,6 +18,9 @@ interface Reader {
   notes: Note[]
 }
 
+/** Naming the first few is enough to see what went wrong. */
+const mostUnknown = 10
+
 const isObject = (raw: unknown): raw is Record<string, unknown> =>
   typeof raw === 'object' && raw !== null && !Array.isArray(raw)
 
@@ -36,9 +39,9 @@ export function readInputs(fields: Fields, raw: unknown, precision: Precision): 
 }
 
 function readFields(fields: Fields, raw: Record<string, unknown>, path: string, reader: Reader): Values {
-  for (const name of Object.keys(raw)) {
-    if (!Object.hasOwn(fields, name))
-      reader.faults.push({ field: join(path, name), message: unknownName(name, fields) })
+  const unknown = Object.keys(raw).filter((name) => !Object.hasOwn(fields, name))
+  for (const name of unknown.slice(0, mostUnknown)) {
+    reader.faults.push({ field: join(path, name.slice(0, 40)) || 'inputs', message: unknownName(name, fields) })
   }
   return Object.fromEntries(
     Object.entries(fields).map(([name, field]) => [
