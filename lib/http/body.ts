@@ -5,7 +5,7 @@ export const bodyLimitBytes = 64 * 1024
 
 const tooLarge = () => new BadRequest(413, `A body has at most ${bodyLimitBytes / 1024} KB.`)
 
-/** Reads the body as text and stops at the limit, whatever length was announced. @throws BadRequest 413 */
+/** Reads the body as text and stops at the limit, whatever length was announced. @throws BadRequest 400, 413 */
 export async function readText(request: Request): Promise<string> {
   if (Number(request.headers.get('content-length')) > bodyLimitBytes) throw tooLarge()
   const parts: Uint8Array[] = []
@@ -19,7 +19,16 @@ export async function readText(request: Request): Promise<string> {
     }
     parts.push(read.value)
   }
-  return Buffer.concat(parts).toString('utf8')
+  return decoded(Buffer.concat(parts))
+}
+
+/** Bytes that are no UTF-8 would come back as other characters, so they are refused. */
+function decoded(bytes: Uint8Array): string {
+  try {
+    return new TextDecoder('utf-8', { fatal: true, ignoreBOM: true }).decode(bytes)
+  } catch {
+    throw new BadRequest(400, 'The body is not UTF-8.')
+  }
 }
 
 /** Reads a JSON body; an empty one is undefined. @throws BadRequest 400, 413, 415 */

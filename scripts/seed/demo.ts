@@ -59,10 +59,13 @@ async function seedJob(): Promise<void> {
   const signIn = await openSignIn(userId, 'seed')
   const actor = await Actor.of(signIn, userId)
   if (!actor) throw new Error('The demo journeyman cannot sign in: the account is disabled.')
-  await inTransaction(async () => {
-    const { id } = await createJob(actor, porchJob)
-    const { sheet } = await saveCutSheet(actor, id, firstMeasure)
-    await reviseCutSheet(actor, id, sheet, secondMeasure)
-  })
-  await endSignIn(signIn, userId)
+  try {
+    await inTransaction(async () => {
+      const { id } = await createJob(actor, porchJob)
+      const { sheet } = await saveCutSheet(actor, id, firstMeasure)
+      await reviseCutSheet(actor, id, sheet, secondMeasure)
+    })
+  } finally {
+    await endSignIn(signIn, userId)
+  }
 }
