@@ -1,4 +1,5 @@
 import { spawnSync } from 'node:child_process'
+import { randomBytes } from 'node:crypto'
 import { rmSync, writeFileSync } from 'node:fs'
 import { distDirectory, hashSources, recordOf } from './build/sources'
 import { dataDirectory } from './setup/entry.mjs'
@@ -7,7 +8,13 @@ import { typescript } from './setup/script'
 
 /** `npm run build`: Next's build, the script hashes its pages are served with, then a record of what it was made of. */
 const distDir = distDirectory()
-const env = { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' } as const
+/** A build asks no database and knows no address: it is the same wherever it will run. Modules check that these are set. */
+const settings = {
+  DATABASE_URL: 'mariadb://nobody@127.0.0.1:1/nothing',
+  APP_ORIGIN: 'http://localhost:3000',
+  AUTH_SECRET: randomBytes(32).toString('hex'),
+}
+const env = { ...process.env, ...settings, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' } as const
 refuseUnderARunningApp()
 
 const record = recordOf(distDir)

@@ -25,7 +25,7 @@ describe('a start after one that was killed', () => {
     const killed = await Longpoint.launch({ directory })
     await killed.address()
     const orphans = [killed.pidOf('app'), killed.pidOf('mariadb')]
-    await killed.end('SIGKILL')
+    await killed.kill()
     expect(orphans.map(birthOf)).not.toContain(undefined)
 
     const next = await Longpoint.launch({ directory, port: killed.port })
@@ -39,7 +39,7 @@ describe('a start after one that was killed', () => {
   it('recovers a database that was killed in the middle of being made', async () => {
     const killed = await Longpoint.launch({ directory })
     while (!killed.output.includes('Making an empty database')) await new Promise((resolve) => setTimeout(resolve, 5))
-    await killed.end('SIGKILL')
+    await killed.kill()
 
     const next = await Longpoint.launch({ directory })
     expect((await fetch(await next.address())).status).toBe(200)
