@@ -70,7 +70,14 @@ function laidPieces({ bar, marks, nest }: Row, kerf: number): Laid[] {
   if (nest && nest.pieces.length === bar.length) return nest.pieces.map(nestedPiece)
   let start = 0
   return bar.map((size, i) => {
-    const laid = { mark: marks[i], size, topStart: start, topEnd: start + size, underStart: start, underEnd: start + size }
+    const laid = {
+      mark: marks[i],
+      size,
+      topStart: start,
+      topEnd: start + size,
+      underStart: start,
+      underEnd: start + size,
+    }
     start += size + kerf
     return laid
   })
@@ -88,13 +95,28 @@ function rowStrokes({ stock, kerf, trim }: Given, row: Row, index: number): Stro
   const pieces = laidPieces(row, kerf)
   const used = Math.max(0, ...pieces.map((p) => Math.max(p.topEnd, p.underEnd)))
   const usable = stock - (trim ?? 0)
-  const corners = (a: number, b: number) => [spot(a, 0, 0, y), spot(b, 0, 0, y), spot(b, 0, 0, y - barHeight), spot(a, 0, 0, y - barHeight)]
+  const corners = (a: number, b: number) => [
+    spot(a, 0, 0, y),
+    spot(b, 0, 0, y),
+    spot(b, 0, 0, y - barHeight),
+    spot(a, 0, 0, y - barHeight),
+  ]
   return [
     ...hatch(Math.min(used + kerf, usable), usable, y, stock),
     ...(trim ? [outline('hatch', corners(usable, stock), 'solid', { passable: true })] : []),
     outline('dim', corners(0, stock)),
     ...pieces.map((p) =>
-      outline('object', [spot(p.topStart, 0, 0, y), spot(p.topEnd, 0, 0, y), spot(p.underEnd, 0, 0, y - barHeight), spot(p.underStart, 0, 0, y - barHeight)], 'face', { part: p.mark }),
+      outline(
+        'object',
+        [
+          spot(p.topStart, 0, 0, y),
+          spot(p.topEnd, 0, 0, y),
+          spot(p.underEnd, 0, 0, y - barHeight),
+          spot(p.underStart, 0, 0, y - barHeight),
+        ],
+        'face',
+        { part: p.mark },
+      ),
     ),
   ]
 }
@@ -118,23 +140,67 @@ function rowLabels({ stock, kerf }: Given, row: Row, index: number, show: Show):
   const pieces = laidPieces(row, kerf).map(({ mark, size, topStart, topEnd, underStart, underEnd }): LabelRequest => {
     const from = spot(Math.max(topStart, underStart), 0, 0, y)
     const to = spot(Math.min(topEnd, underEnd), 0, 0, y)
-    const shared = { kind: 'along', size: 'note', from, to, side: 'within', gap: 0, required: false, worth: 0.4, part: mark } as const
+    const shared = {
+      kind: 'along',
+      size: 'note',
+      from,
+      to,
+      side: 'within',
+      gap: 0,
+      required: false,
+      worth: 0.4,
+      part: mark,
+    } as const
     const name = mark ? [word(mark, 'text')] : []
     const whole = [[...name, ...(mark ? [word(' ')] : []), ...length(size, show)]]
     return { ...shared, text: whole, otherwise: mark ? { ...shared, text: [name] } : undefined }
   })
   return [
-    { kind: 'at', text: [name], size: 'note', spot: spot(0, 0, 0, y), prefer: [180], gap: 10, reach: 10, required: true, leader: false },
+    {
+      kind: 'at',
+      text: [name],
+      size: 'note',
+      spot: spot(0, 0, 0, y),
+      prefer: [180],
+      gap: 10,
+      reach: 10,
+      required: true,
+      leader: false,
+    },
     ...pieces,
     ...(row.drop > 0
-      ? [{ kind: 'at', text: [[word('drop '), ...length(row.drop, show, 'quiet')]], size: 'note', spot: spot(stock, 0, 0, y - barHeight / 2), prefer: [-160, -165, -170], gap: 5, reach: 40, required: false, worth: 0.5, leader: false } as const]
+      ? [
+          {
+            kind: 'at',
+            text: [[word('drop '), ...length(row.drop, show, 'quiet')]],
+            size: 'note',
+            spot: spot(stock, 0, 0, y - barHeight / 2),
+            prefer: [-160, -165, -170],
+            gap: 5,
+            reach: 40,
+            required: false,
+            worth: 0.5,
+            leader: false,
+          } as const,
+        ]
       : []),
   ]
 }
 
 function more(hidden: number): LabelRequest[] {
   if (hidden <= 0) return []
-  return [{ kind: 'at', text: [[word(`and ${hidden} more ways of cutting: the list has them all`)]], size: 'note', spot: spot(0, 0, 0, bottomOf(mostRows)), prefer: [0], gap: 4, required: true, leader: false }]
+  return [
+    {
+      kind: 'at',
+      text: [[word(`and ${hidden} more ways of cutting: the list has them all`)]],
+      size: 'note',
+      spot: spot(0, 0, 0, bottomOf(mostRows)),
+      prefer: [0],
+      gap: 4,
+      required: true,
+      leader: false,
+    },
+  ]
 }
 
 function saysOf({ stock }: Given, { sticks, yieldPct }: Solved, rows: readonly Row[], show: Show): string {

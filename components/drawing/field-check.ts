@@ -64,7 +64,11 @@ function glassStrokes(given: Given, solved: FieldCheckAnswer): Stroke[] {
 function gapText(solved: FieldCheckAnswer, show: Show, ink: LabelInk): Line {
   const amount = Math.abs(solved.closingError)
   if (amount < 0.5 / show.tape) return [word('the rake closes', 'text')]
-  return [word('rake reads ', ink), ...length(amount, show, ink), word(solved.closingError > 0 ? ' short' : ' long', ink)]
+  return [
+    word('rake reads ', ink),
+    ...length(amount, show, ink),
+    word(solved.closingError > 0 ? ' short' : ' long', ink),
+  ]
 }
 
 function labelsOf(given: Given, solved: FieldCheckAnswer, show: Show, ink: LabelInk): LabelRequest[] {
@@ -74,13 +78,76 @@ function labelsOf(given: Given, solved: FieldCheckAnswer, show: Show, ink: Label
   const times = magnification(given, solved.closingError)
   const drift = toward(spot(0, 0), given.angleFinder, rake)
   return [
-    { kind: 'at', text: [gapText(solved, show, ink), [word(solved.verdict, ink)]], size: 'number', spot: nudged(glassCentre(given), 0, glass), prefer: [0, 20, 45, 90], gap: 12, required: true, leader: false },
-    { kind: 'dimension', text: [[...length(rise, show), word(' rise')]], size: 'number', from: spot(run, 0), to: corner, side: 'right', offset: 34, required: true },
-    { kind: 'dimension', text: [[...length(run, show), word(' run')]], size: 'number', from: spot(0, 0), to: spot(run, 0), side: 'right', offset: 30, required: true },
-    { kind: 'dimension', text: [[...length(rake, show), word(' rake')]], size: 'number', from: spot(0, 0), to: corner, side: 'left', offset: 30, required: true },
-    { kind: 'at', text: [degrees(pitch, 1)], size: 'number', spot: nudged(spot(0, 0), pitch / 2, 84), prefer: [pitch / 2, 0, -20, -90], gap: 8, required: show.detail === 'full' },
-    { kind: 'at', text: [[word('enlarged '), word(`×${times}`, 'text')]], size: 'note', spot: nudged(glassCentre(given), 90, glass), prefer: [90, 60, 0], gap: 6, required: false, leader: false },
-    { kind: 'at', text: [[word('finder '), ...degrees(given.angleFinder, 1, Math.abs(solved.angleFinderError) > 0.5 ? 'off' : 'quiet')]], size: 'note', spot: drift, prefer: [45, 0, 90, 20, -20], gap: 8, required: show.detail === 'full' },
+    {
+      kind: 'at',
+      text: [gapText(solved, show, ink), [word(solved.verdict, ink)]],
+      size: 'number',
+      spot: nudged(glassCentre(given), 0, glass),
+      prefer: [0, 20, 45, 90],
+      gap: 12,
+      required: true,
+      leader: false,
+    },
+    {
+      kind: 'dimension',
+      text: [[...length(rise, show), word(' rise')]],
+      size: 'number',
+      from: spot(run, 0),
+      to: corner,
+      side: 'right',
+      offset: 34,
+      required: true,
+    },
+    {
+      kind: 'dimension',
+      text: [[...length(run, show), word(' run')]],
+      size: 'number',
+      from: spot(0, 0),
+      to: spot(run, 0),
+      side: 'right',
+      offset: 30,
+      required: true,
+    },
+    {
+      kind: 'dimension',
+      text: [[...length(rake, show), word(' rake')]],
+      size: 'number',
+      from: spot(0, 0),
+      to: corner,
+      side: 'left',
+      offset: 30,
+      required: true,
+    },
+    {
+      kind: 'at',
+      text: [degrees(pitch, 1)],
+      size: 'number',
+      spot: nudged(spot(0, 0), pitch / 2, 84),
+      prefer: [pitch / 2, 0, -20, -90],
+      gap: 8,
+      required: show.detail === 'full',
+    },
+    {
+      kind: 'at',
+      text: [[word('enlarged '), word(`×${times}`, 'text')]],
+      size: 'note',
+      spot: nudged(glassCentre(given), 90, glass),
+      prefer: [90, 60, 0],
+      gap: 6,
+      required: false,
+      leader: false,
+    },
+    {
+      kind: 'at',
+      text: [
+        [word('finder '), ...degrees(given.angleFinder, 1, Math.abs(solved.angleFinderError) > 0.5 ? 'off' : 'quiet')],
+      ],
+      size: 'note',
+      spot: drift,
+      prefer: [45, 0, 90, 20, -20],
+      gap: 8,
+      required: show.detail === 'full',
+    },
   ]
 }
 
@@ -88,7 +155,9 @@ function saysOf(given: Given, solved: FieldCheckAnswer, show: Show): string {
   const amount = Math.abs(solved.closingError)
   return [
     `Rise ${plain([length(given.rise, show)])}, run ${plain([length(given.run, show)])}, rake ${plain([length(given.rake, show)])}.`,
-    amount < 0.5 / show.tape ? 'The rake closes.' : `The rake reads ${plain([length(amount, show)])} ${solved.closingError > 0 ? 'short' : 'long'}.`,
+    amount < 0.5 / show.tape
+      ? 'The rake closes.'
+      : `The rake reads ${plain([length(amount, show)])} ${solved.closingError > 0 ? 'short' : 'long'}.`,
     `The tapes make ${plain([degrees(solved.pitchFromTape, 1)])}; the angle finder reads ${plain([degrees(given.angleFinder, 1)])}.`,
     `Verdict: ${solved.verdict}.`,
   ].join(' ')

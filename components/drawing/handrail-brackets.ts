@@ -45,7 +45,15 @@ export function bracketLabels(solved: HandrailOutputs, show: Show): LabelRequest
   const all = bracketsOf(solved)
   if (show.detail === 'compact' || all.length > mostMarked) return []
   return all.map(({ foot, part, mark, tooClose }) => ({
-    kind: 'at', text: [length(mark, show, tooClose ? 'off' : 'quiet')], size: 'note', part, required: false,
-    spot: nudged(foot, -90, stem), prefer: [-70, -90, -50, -110], gap: 4, reach: 14, worth: 0.6,
+    kind: 'at',
+    text: [length(mark, show, tooClose ? 'off' : 'quiet')],
+    size: 'note',
+    part,
+    required: false,
+    spot: nudged(foot, -90, stem),
+    prefer: [-70, -90, -50, -110],
+    gap: 4,
+    reach: 14,
+    worth: 0.6,
   }))
 }

@@ -4,11 +4,9 @@ import { degrees, inchesOnly, length, number, shape, word } from '@/lib/drawing/
 import type { HandrailInputs, HandrailOutputs, Point } from '@/lib/trade/rail/types'
 import { at } from './handrail-parts'
 
-/** The stair as a ghost, dashed where its treads were not measured, and a plumb line at the end nosings. */
-export function stairStrokes(solved: HandrailOutputs): Stroke[] {
-  const stair = solved.stair.map(({ points, assumed }) => path(assumed ? 'centre' : 'ghost', points.map(at)))
-  const plumbs = plumbLines(solved).map(({ nosing, rail }) => path('centre', [at(nosing), at(rail)]))
-  return [...stair, ...plumbs]
+/** The stair as a ghost, dashed where its treads were not measured. */
+export function stairStrokes({ stair }: HandrailOutputs): Stroke[] {
+  return stair.map(({ points, assumed }) => path(assumed ? 'centre' : 'ghost', points.map(at)))
 }
 
 /** The bottom and the top nosing, each with the rail plumb over it. */
@@ -33,7 +31,7 @@ function heightAt(line: readonly Point[], x: number): number | undefined {
 /** Heights, pitches, the way up, the hand, and how far the end knuckles stand off their nosings. */
 export function stairLabels(given: HandrailInputs, solved: HandrailOutputs, show: Show): LabelRequest[] {
   const full = show.detail === 'full'
-  return [...hand(solved, full), ...wayUp(solved), ...(full ? [...heights(solved, show), ...offsets(solved, show), ...pitches(solved)] : [])]
+  return [...hand(solved, full), ...wayUp(solved), ...(full ? [...offsets(solved, show), ...pitches(solved)] : [])]
 }
 
 function hand({ hand: side, topLine }: HandrailOutputs, full: boolean): LabelRequest[] {
@@ -42,20 +40,51 @@ function hand({ hand: side, topLine }: HandrailOutputs, full: boolean): LabelReq
   if (!low || !high) return []
   // A rail climbs: the corner over its low end is the one free place of every such drawing.
   const corner = spot(low.x, high.y)
-  return [{ kind: 'at', text: [[number(side), word(full ? ' hand, going UP' : ' hand')]], size: 'answer', spot: corner, prefer: [-40, -70, -20, 0, 90], gap: 0, required: true, leader: false }]
+  return [
+    {
+      kind: 'at',
+      text: [[number(side), word(full ? ' hand, going UP' : ' hand')]],
+      size: 'answer',
+      spot: corner,
+      prefer: [-40, -70, -20, 0, 90],
+      gap: 0,
+      required: true,
+      leader: false,
+    },
+  ]
 }
 
 function wayUp({ nosings }: HandrailOutputs): LabelRequest[] {
   const first = nosings[0]
   const [from, to] = [first?.[0], first?.at(-1)]
   if (!from || !to) return []
-  return [{ kind: 'along', text: [[word('UP '), shape('arrow', 'quiet')]], size: 'number', from: at(from), to: at(to), side: 'below', gap: 22, reach: 60, required: true }]
+  return [
+    {
+      kind: 'along',
+      text: [[word('UP '), shape('arrow', 'quiet')]],
+      size: 'number',
+      from: at(from),
+      to: at(to),
+      side: 'below',
+      gap: 22,
+      reach: 60,
+      required: true,
+    },
+  ]
 }
 
-function heights(solved: HandrailOutputs, show: Show): LabelRequest[] {
+/** Rail height at the bottom and the top nosing, plumb. */
+export function heightLabels(solved: HandrailOutputs, show: Show): LabelRequest[] {
   return plumbLines(solved).map(({ nosing, rail }, i) => ({
-    kind: 'at', text: [[...inchesOnly(rail.y - nosing.y, show), word(' plumb')]], size: 'note', required: false,
-    spot: spot(nosing.x, (nosing.y + rail.y) / 2), prefer: i === 0 ? [180, 0] : [0, 180], gap: 6, reach: 60,
+    kind: 'dimension',
+    text: [inchesOnly(rail.y - nosing.y, show)],
+    size: 'number',
+    from: at(nosing),
+    to: at(rail),
+    side: 'right',
+    offset: 0,
+    tries: 1,
+    required: i === 0,
   }))
 }
 
@@ -69,7 +98,19 @@ function offsets({ knuckles, nosings, topLine }: HandrailOutputs, show: Show): L
     const y = heightAt(topLine, nosing.x + off)
     if (y === undefined) return []
     const [left, right] = off > 0 ? [nosing.x, nosing.x + off] : [nosing.x + off, nosing.x]
-    return [{ kind: 'dimension', text: [length(Math.abs(off), show)], size: 'note', from: spot(left, y), to: spot(right, y), side, measure: 'level', offset: 34, required: false }]
+    return [
+      {
+        kind: 'dimension',
+        text: [length(Math.abs(off), show)],
+        size: 'note',
+        from: spot(left, y),
+        to: spot(right, y),
+        side,
+        measure: 'level',
+        offset: 34,
+        required: false,
+      },
+    ]
   })
 }
 
@@ -78,6 +119,18 @@ function pitches({ pitches: slopes, nosings }: HandrailOutputs): LabelRequest[] 
     const [from, to] = [flight[0], flight.at(-1)]
     const slope = slopes[i]
     if (!from || !to || slope === undefined) return []
-    return [{ kind: 'along', text: [[...degrees(slope, 2), word(' pitch')]], size: 'note', from: at(from), to: at(to), side: 'above', gap: 8, reach: 40, required: false }]
+    return [
+      {
+        kind: 'along',
+        text: [[...degrees(slope, 2), word(' pitch')]],
+        size: 'note',
+        from: at(from),
+        to: at(to),
+        side: 'above',
+        gap: 8,
+        reach: 40,
+        required: false,
+      },
+    ]
   })
 }

@@ -2,8 +2,8 @@ import { mirror } from '@/lib/drawing/mirror'
 import type { Drawing, Sketch } from '@/lib/drawing/sketch'
 import type { HandrailInputs, HandrailOutputs } from '@/lib/trade/rail/types'
 import { bracketLabels, bracketStrokes } from './handrail-brackets'
-import { edgeLabels, jointLabels, jointStrokes, markLabels, partStrokes } from './handrail-parts'
-import { stairLabels, stairStrokes } from './handrail-stair'
+import { edgeLabels, jointLabels, jointStrokes, markLabels, partStrokes, returnLabels } from './handrail-parts'
+import { heightLabels, stairLabels, stairStrokes } from './handrail-stair'
 import { saysOf } from './handrail-words'
 
 /**
@@ -11,13 +11,16 @@ import { saysOf } from './handrail-words'
  * A left hand rail climbs to the right, a right hand one to the left.
  */
 export const draw: Drawing<HandrailInputs, HandrailOutputs> = (given, solved, show) => {
+  const full = show.detail === 'full'
   const sketch: Sketch = {
     strokes: [...stairStrokes(solved), ...partStrokes(solved), ...bracketStrokes(solved), ...jointStrokes(solved)],
     labels: [
       ...edgeLabels(solved, show),
+      ...(full ? heightLabels(solved, show) : []),
       ...jointLabels(solved, show),
       ...markLabels(solved, show),
       ...stairLabels(given, solved, show),
+      ...(full ? returnLabels(solved, show) : []),
       ...bracketLabels(solved, show),
     ],
     says: saysOf(solved, show),

@@ -18,7 +18,10 @@ interface Places {
   lowEnd: Spot
 }
 
-function placesOf({ pitch, rakeHeight, topLevelHeight, bottomLevelHeight, firstRise }: KnuckleGiven, solved: KnuckleAnswer): Places {
+function placesOf(
+  { pitch, rakeHeight, topLevelHeight, bottomLevelHeight, firstRise }: KnuckleGiven,
+  solved: KnuckleAnswer,
+): Places {
   const run = assumedRun * assumedSteps
   const top = spot(run, run * tanDeg(pitch))
   const before = solved.beforeBottomNosing
@@ -38,7 +41,10 @@ export const draw: Drawing<KnuckleGiven, KnuckleAnswer> = (given, solved, show) 
   return { strokes: strokesOf(given, at), labels: labelsOf(given, solved, show, at), says: saysOf(given, solved, show) }
 }
 
-function strokesOf({ pitch, rakeHeight, firstRise }: KnuckleGiven, { bottom, top, topKnuckle, bottomKnuckle, lowEnd }: Places): Stroke[] {
+function strokesOf(
+  { pitch, rakeHeight, firstRise }: KnuckleGiven,
+  { bottom, top, topKnuckle, bottomKnuckle, lowEnd }: Places,
+): Stroke[] {
   const floor = -(firstRise ?? assumedRun * tanDeg(pitch))
   const profile = steps({ x: 0, y: 0 }, assumedSteps + 1, assumedRun * tanDeg(pitch), assumedRun).slice(1, -1)
   const end = spot(Math.max(top.x, topKnuckle.x) + levelShown, topKnuckle.y)
@@ -58,11 +64,33 @@ function strokesOf({ pitch, rakeHeight, firstRise }: KnuckleGiven, { bottom, top
 
 function offsetLabel(off: number, nosing: Spot, knuckle: Spot, show: Show, side: 'left' | 'right'): LabelRequest[] {
   if (Math.abs(off) < 1 / 64) {
-    return [{ kind: 'at', text: [[word('plumb over the nosing', 'cut')]], size: 'number', spot: knuckle, prefer: [70, 110, 45], gap: 20, required: true }]
+    return [
+      {
+        kind: 'at',
+        text: [[word('plumb over the nosing', 'cut')]],
+        size: 'number',
+        spot: knuckle,
+        prefer: [70, 110, 45],
+        gap: 20,
+        required: true,
+      },
+    ]
   }
   const [a, b] = [spot(nosing.x, knuckle.y), spot(knuckle.x, knuckle.y)]
   const [from, to] = a.x < b.x ? [a, b] : [b, a]
-  return [{ kind: 'dimension', text: [length(Math.abs(off), show, 'cut')], size: 'answer', from, to, side, measure: 'level', offset: 36, required: true }]
+  return [
+    {
+      kind: 'dimension',
+      text: [length(Math.abs(off), show, 'cut')],
+      size: 'answer',
+      from,
+      to,
+      side,
+      measure: 'level',
+      offset: 36,
+      required: true,
+    },
+  ]
 }
 
 function labelsOf(given: KnuckleGiven, solved: KnuckleAnswer, show: Show, at: Places): LabelRequest[] {
@@ -73,18 +101,76 @@ function labelsOf(given: KnuckleGiven, solved: KnuckleAnswer, show: Show, at: Pl
   return [
     ...offsetLabel(solved.pastTopNosing, at.top, at.topKnuckle, show, 'left'),
     ...(at.bottomKnuckle && before !== null ? offsetLabel(before, at.bottom, at.bottomKnuckle, show, 'left') : []),
-    { kind: 'dimension', text: [inchesOnly(rakeHeight, show)], size: 'number', from: middle, to: spot(middle.x, middle.y + rakeHeight), side: 'right', offset: 0, required: true },
-    { kind: 'dimension', text: [inchesOnly(topLevelHeight, show)], size: 'number', from: spot(past, at.top.y), to: spot(past, at.topKnuckle.y), side: 'right', offset: 0, required: true },
+    {
+      kind: 'dimension',
+      text: [inchesOnly(rakeHeight, show)],
+      size: 'number',
+      from: middle,
+      to: spot(middle.x, middle.y + rakeHeight),
+      side: 'right',
+      offset: 0,
+      required: true,
+    },
+    {
+      kind: 'dimension',
+      text: [inchesOnly(topLevelHeight, show)],
+      size: 'number',
+      from: spot(past, at.top.y),
+      to: spot(past, at.topKnuckle.y),
+      side: 'right',
+      offset: 0,
+      required: true,
+    },
     ...(at.bottomKnuckle && typeof bottomLevelHeight === 'number'
-      ? [{ kind: 'dimension', text: [inchesOnly(bottomLevelHeight, show)], size: 'number', from: spot(at.bottomKnuckle.x - 12, -(firstRise ?? 0)), to: spot(at.bottomKnuckle.x - 12, at.bottomKnuckle.y), side: 'left', offset: 0, required: true } as const]
+      ? [
+          {
+            kind: 'dimension',
+            text: [inchesOnly(bottomLevelHeight, show)],
+            size: 'number',
+            from: spot(at.bottomKnuckle.x - 12, -(firstRise ?? 0)),
+            to: spot(at.bottomKnuckle.x - 12, at.bottomKnuckle.y),
+            side: 'left',
+            offset: 0,
+            required: true,
+          } as const,
+        ]
       : []),
-    { kind: 'at', text: [degrees(pitch, 2)], size: 'number', spot: spot(at.lowEnd.x, at.lowEnd.y, 82 * Math.cos((pitch * Math.PI) / 360), 82 * Math.sin((pitch * Math.PI) / 360)), prefer: [pitch / 2, 0, -30], gap: 8, required: show.detail === 'full' },
-    { kind: 'along', text: [[word('UP '), shape('arrow', 'quiet')]], size: 'number', from: spot(0, 0), to: at.top, side: 'below', gap: 26, reach: 80, required: false },
+    {
+      kind: 'at',
+      text: [degrees(pitch, 2)],
+      size: 'number',
+      spot: spot(
+        at.lowEnd.x,
+        at.lowEnd.y,
+        82 * Math.cos((pitch * Math.PI) / 360),
+        82 * Math.sin((pitch * Math.PI) / 360),
+      ),
+      prefer: [pitch / 2, 0, -30],
+      gap: 8,
+      required: show.detail === 'full',
+    },
+    {
+      kind: 'along',
+      text: [[word('UP '), shape('arrow', 'quiet')]],
+      size: 'number',
+      from: spot(0, 0),
+      to: at.top,
+      side: 'below',
+      gap: 26,
+      reach: 80,
+      required: false,
+    },
   ]
 }
 
-function saysOf({ pitch, rakeHeight, topLevelHeight }: KnuckleGiven, { pastTopNosing, beforeBottomNosing }: KnuckleAnswer, show: Show): string {
+function saysOf(
+  { pitch, rakeHeight, topLevelHeight }: KnuckleGiven,
+  { pastTopNosing, beforeBottomNosing }: KnuckleAnswer,
+  show: Show,
+): string {
   const off = (value: number) => (Math.abs(value) < 1 / 64 ? 'plumb over' : plain([length(Math.abs(value), show)]))
   const top = `At ${plain([degrees(pitch, 2)])}, ${plain([inchesOnly(rakeHeight, show)])} on the rake and ${plain([inchesOnly(topLevelHeight, show)])} on the level: the rake turns level ${off(pastTopNosing)} ${pastTopNosing < 0 ? 'before' : 'past'} the top nosing.`
-  return beforeBottomNosing === null ? top : `${top} At the bottom it turns ${off(beforeBottomNosing)} ${beforeBottomNosing < 0 ? 'past' : 'in front of'} the bottom nosing.`
+  return beforeBottomNosing === null
+    ? top
+    : `${top} At the bottom it turns ${off(beforeBottomNosing)} ${beforeBottomNosing < 0 ? 'past' : 'in front of'} the bottom nosing.`
 }

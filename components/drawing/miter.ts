@@ -59,10 +59,7 @@ function bendArc(middle: Spot, { slopeBelow, slopeAbove }: Given) {
 function slopeArc(corner: Spot, slope: number, along = 0) {
   if (Math.abs(slope) < 0.5) return []
   const at = toward(corner, slope, along)
-  return [
-    path('ext', [nudged(at, 0, 8), nudged(at, 0, 112)]),
-    angleArc(at, 96, Math.min(0, slope), Math.max(0, slope)),
-  ]
+  return [path('ext', [nudged(at, 0, 8), nudged(at, 0, 112)]), angleArc(at, 96, Math.min(0, slope), Math.max(0, slope))]
 }
 
 interface Places {
@@ -85,7 +82,17 @@ function labelsOf(given: Given, solved: MiterAnswer, show: Show, at: Places): La
   const slopeLabel = (corner: Spot, slope: number): LabelRequest[] =>
     Math.abs(slope) < 0.5
       ? []
-      : [{ kind: 'at', text: [degrees(slope, 1)], size: 'number', spot: nudged(corner, slope / 2, 96), prefer: [slope / 2, 0, 20, -20], gap: 8, required: full }]
+      : [
+          {
+            kind: 'at',
+            text: [degrees(slope, 1)],
+            size: 'number',
+            spot: nudged(corner, slope / 2, 96),
+            prefer: [slope / 2, 0, 20, -20],
+            gap: 8,
+            required: full,
+          },
+        ]
   return [
     {
       kind: 'at',
@@ -93,19 +100,57 @@ function labelsOf(given: Given, solved: MiterAnswer, show: Show, at: Places): La
         [word('saw ', 'cut'), ...dial(solved.sawSquareIs0, show, 'cut')],
         [word('or '), ...dial(solved.sawSquareIs90, show, 'quiet'), word(' where square reads 90')],
       ],
-      size: 'answer', spot: cutEnd, prefer: [-45, 0, -90, -135], gap: 6, required: true,
+      size: 'answer',
+      spot: cutEnd,
+      prefer: [-45, 0, -90, -135],
+      gap: 6,
+      required: true,
     },
     ...slopeLabel(at.lowUnder, slopeBelow),
     ...slopeLabel(toward(at.under, slopeAbove, depth * 2), slopeAbove),
     ...(at.bends
       ? [
-          { kind: 'at', text: [[word('bend '), ...degrees(solved.bend, 1)]], size: 'number', spot: nudged(at.middle, (slopeBelow + slopeAbove) / 2, 150), prefer: [(slopeBelow + slopeAbove) / 2, 0, 30], gap: 8, required: full } as const,
-          { kind: 'at', text: [[word(at.onTop ? 'long on top' : 'long underneath', 'cut')]], size: 'number', spot: nudged(at.long, at.onTop ? 90 : -90, 14), prefer: at.onTop ? [45, 135, 0, 180] : [-45, -135, 0, 180], gap: 6, required: true } as const,
+          {
+            kind: 'at',
+            text: [[word('bend '), ...degrees(solved.bend, 1)]],
+            size: 'number',
+            spot: nudged(at.middle, (slopeBelow + slopeAbove) / 2, 150),
+            prefer: [(slopeBelow + slopeAbove) / 2, 0, 30],
+            gap: 8,
+            required: full,
+          } as const,
+          {
+            kind: 'at',
+            text: [[word(at.onTop ? 'long on top' : 'long underneath', 'cut')]],
+            size: 'number',
+            spot: nudged(at.long, at.onTop ? 90 : -90, 14),
+            prefer: at.onTop ? [45, 135, 0, 180] : [-45, -135, 0, 180],
+            gap: 6,
+            required: true,
+          } as const,
           ...setbackOf(given, solved, show, at),
         ]
       : []),
-    { kind: 'along', text: [[word('UP '), shape('arrow', 'quiet')]], size: 'number', from: at.lowTop, to: at.top, side: 'above', gap: 12, required: true },
-    { kind: 'dimension', text: [length(depth, show)], size: 'number', from: at.lowTop, to: at.lowUnder, side: 'right', required: false, offset: 30 },
+    {
+      kind: 'along',
+      text: [[word('UP '), shape('arrow', 'quiet')]],
+      size: 'number',
+      from: at.lowTop,
+      to: at.top,
+      side: 'above',
+      gap: 12,
+      required: true,
+    },
+    {
+      kind: 'dimension',
+      text: [length(depth, show)],
+      size: 'number',
+      from: at.lowTop,
+      to: at.lowUnder,
+      side: 'right',
+      required: false,
+      offset: 30,
+    },
   ]
 }
 
@@ -113,12 +158,25 @@ function labelsOf(given: Given, solved: MiterAnswer, show: Show, at: Places): La
 function setbackOf({ slopeBelow }: Given, solved: MiterAnswer, show: Show, at: Places): LabelRequest[] {
   const foot = toward(at.long, slopeBelow + 180, solved.setback)
   return [
-    { kind: 'dimension', text: [[...length(solved.setback, show), word(' each')]], size: 'number', from: foot, to: at.long, side: at.onTop ? 'left' : 'right', offset: 46, required: show.detail === 'full' && solved.setback > 1 / 16 },
+    {
+      kind: 'dimension',
+      text: [[...length(solved.setback, show), word(' each')]],
+      size: 'number',
+      from: foot,
+      to: at.long,
+      side: at.onTop ? 'left' : 'right',
+      offset: 46,
+      required: show.detail === 'full' && solved.setback > 1 / 16,
+    },
   ]
 }
 
 function saysOf(given: Given, solved: MiterAnswer, show: Show): string {
-  const face = { top: 'Long point on top of both pieces.', underside: 'Long point underneath on both pieces.', none: 'The line does not bend.' }
+  const face = {
+    top: 'Long point on top of both pieces.',
+    underside: 'Long point underneath on both pieces.',
+    none: 'The line does not bend.',
+  }
   return [
     `A bar at ${plain([degrees(given.slopeBelow, 1)])} meets a bar at ${plain([degrees(given.slopeAbove, 1)])}, both ${plain([length(given.depth, show)])} deep.`,
     `Saw ${plain([dial(solved.sawSquareIs0, show)])} off square, which is ${plain([dial(solved.sawSquareIs90, show)])} where square reads 90.`,

@@ -32,18 +32,63 @@ function labelsOf({ risers, rise, run }: Given, solved: NosingLine, show: Show):
   const top = spot(solved.runNosingToNosing, solved.riseNosingToNosing)
   const nosings = Array.from({ length: risers }, (_, i) => i)
   return [
-    { kind: 'dimension', text: [[...length(solved.rakeNosingToNosing, show, 'cut'), word(` in ${risers - 1} ${risers === 2 ? 'step' : 'steps'}`)]], size: 'answer', from: spot(0, 0), to: top, side: 'left', offset: 34, required: true },
-    { kind: 'dimension', text: [length(solved.riseNosingToNosing, show)], size: 'number', from: spot(top.x + run, 0), to: spot(top.x + run, top.y), side: 'right', offset: 22, required: full },
-    { kind: 'dimension', text: [length(solved.runNosingToNosing, show)], size: 'number', from: spot(0, -rise), to: spot(top.x, -rise), side: 'right', offset: 26, required: full },
     {
-      kind: 'at', text: [degrees(solved.pitch, 2)], size: 'number', required: full, gap: 8,
-      spot: spot(0, 0, 88 * Math.cos((solved.pitch * Math.PI) / 360), 88 * Math.sin((solved.pitch * Math.PI) / 360)), prefer: [solved.pitch / 2, 0, -45],
+      kind: 'dimension',
+      text: [
+        [
+          ...length(solved.rakeNosingToNosing, show, 'cut'),
+          word(` in ${risers - 1} ${risers === 2 ? 'step' : 'steps'}`),
+        ],
+      ],
+      size: 'answer',
+      from: spot(0, 0),
+      to: top,
+      side: 'left',
+      offset: 34,
+      required: true,
+    },
+    {
+      kind: 'dimension',
+      text: [length(solved.riseNosingToNosing, show)],
+      size: 'number',
+      from: spot(top.x + run, 0),
+      to: spot(top.x + run, top.y),
+      side: 'right',
+      offset: 22,
+      required: full,
+    },
+    {
+      kind: 'dimension',
+      text: [length(solved.runNosingToNosing, show)],
+      size: 'number',
+      from: spot(0, -rise),
+      to: spot(top.x, -rise),
+      side: 'right',
+      offset: 26,
+      required: full,
+    },
+    {
+      kind: 'at',
+      text: [degrees(solved.pitch, 2)],
+      size: 'number',
+      required: full,
+      gap: 8,
+      spot: spot(0, 0, 88 * Math.cos((solved.pitch * Math.PI) / 360), 88 * Math.sin((solved.pitch * Math.PI) / 360)),
+      prefer: [solved.pitch / 2, 0, -45],
     },
     ...nosings.map((i): LabelRequest => {
       const isEnd = i === 0 || i === risers - 1
       return {
-        kind: 'at', text: [[number(String(i + 1), isEnd ? 'text' : 'quiet')]], size: 'note', required: isEnd, worth: 0.5,
-        spot: spot(i * run, i * rise), prefer: isEnd ? [135, 110, 160, -45, 90, 180] : [-45, -30, -60], gap: 5, reach: isEnd ? 60 : 8, leader: isEnd,
+        kind: 'at',
+        text: [[number(String(i + 1), isEnd ? 'text' : 'quiet')]],
+        size: 'note',
+        required: isEnd,
+        worth: 0.5,
+        spot: spot(i * run, i * rise),
+        prefer: isEnd ? [135, 110, 160, -45, 90, 180] : [-45, -30, -60],
+        gap: 5,
+        reach: isEnd ? 60 : 8,
+        leader: isEnd,
       }
     }),
   ]

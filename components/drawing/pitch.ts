@@ -9,7 +9,13 @@ const oneTread = 24
 /** A right triangle laid on the nosing line: rise, run and rake of the very numbers. */
 export const draw: Drawing<Record<string, unknown>, PitchAnswer> = (_given, solved, show) => {
   const { rise, run, pitch } = solved
-  const before = run <= oneTread ? [path('ghost', [spot(-0.5 * run, -rise), spot(0, -rise), spot(0, 0)]), path('ghost', [spot(run, rise), spot(1.5 * run, rise)])] : []
+  const before =
+    run <= oneTread
+      ? [
+          path('ghost', [spot(-0.5 * run, -rise), spot(0, -rise), spot(0, 0)]),
+          path('ghost', [spot(run, rise), spot(1.5 * run, rise)]),
+        ]
+      : []
   return {
     strokes: [
       ...before,
@@ -25,13 +31,44 @@ export const draw: Drawing<Record<string, unknown>, PitchAnswer> = (_given, solv
 function labelsOf({ rise, run, rake, pitch, inPer12 }: PitchAnswer, show: Show): LabelRequest[] {
   const corner = spot(run, rise)
   return [
-    { kind: 'dimension', text: [[...length(rake, show), word(' rake')]], size: 'number', from: spot(0, 0), to: corner, side: 'left', offset: 30, required: true },
-    { kind: 'dimension', text: [[...length(rise, show), word(' rise')]], size: 'number', from: spot(run, 0), to: corner, side: 'right', offset: 30, required: true },
-    { kind: 'dimension', text: [[...length(run, show), word(' run')]], size: 'number', from: spot(0, 0), to: spot(run, 0), side: 'right', offset: 30, required: true },
     {
-      kind: 'at', size: 'answer', required: true, gap: 10,
+      kind: 'dimension',
+      text: [[...length(rake, show), word(' rake')]],
+      size: 'number',
+      from: spot(0, 0),
+      to: corner,
+      side: 'left',
+      offset: 30,
+      required: true,
+    },
+    {
+      kind: 'dimension',
+      text: [[...length(rise, show), word(' rise')]],
+      size: 'number',
+      from: spot(run, 0),
+      to: corner,
+      side: 'right',
+      offset: 30,
+      required: true,
+    },
+    {
+      kind: 'dimension',
+      text: [[...length(run, show), word(' run')]],
+      size: 'number',
+      from: spot(0, 0),
+      to: spot(run, 0),
+      side: 'right',
+      offset: 30,
+      required: true,
+    },
+    {
+      kind: 'at',
+      size: 'answer',
+      required: true,
+      gap: 10,
       text: [degrees(pitch, 2, 'cut'), [number(inPer12.toFixed(2), 'quiet'), word(' in 12')]],
-      spot: arcMiddle(pitch), prefer: [pitch / 2, 0, -30, -90],
+      spot: arcMiddle(pitch),
+      prefer: [pitch / 2, 0, -30, -90],
     },
   ]
 }

@@ -15,11 +15,14 @@ const inkClass: Readonly<Record<LabelInk, string | undefined>> = {
 export function PlateLabels({ labels, highlight }: { labels: readonly PlacedLabel[]; highlight: string | null }) {
   return labels.map((label, i) => (
     <g key={i} data-part={label.part} data-on={label.part !== undefined && label.part === highlight ? '' : undefined}>
-      {label.badge === 'disc' && <circle className={styles.disc} cx={label.box.x} cy={label.box.y} r={label.box.halfWidth} />}
-      <g className={styles.words} transform={`translate(${label.x.toFixed(1)} ${label.y.toFixed(1)}) rotate(${label.turn.toFixed(2)})`}>
-        <text>
-          {label.runs.map((run, j) => run.kind === 'text' && <TextRun key={j} run={run} />)}
-        </text>
+      {label.badge === 'disc' && (
+        <circle className={styles.disc} cx={label.box.x} cy={label.box.y} r={label.box.halfWidth} />
+      )}
+      <g
+        className={styles.words}
+        transform={`translate(${label.x.toFixed(1)} ${label.y.toFixed(1)}) rotate(${label.turn.toFixed(2)})`}
+      >
+        <text>{label.runs.map((run, j) => run.kind === 'text' && <TextRun key={j} run={run} />)}</text>
         {label.runs.map((run, j) => run.kind === 'shape' && <ShapeRun key={j} run={run} />)}
       </g>
     </g>
@@ -28,7 +31,12 @@ export function PlateLabels({ labels, highlight }: { labels: readonly PlacedLabe
 
 function TextRun({ run }: { run: Extract<PlacedRun, { kind: 'text' }> }) {
   return (
-    <tspan x={run.x.toFixed(2)} y={run.y.toFixed(2)} fontSize={run.size.toFixed(2)} className={`${styles[run.face]} ${inkClass[run.ink]}`}>
+    <tspan
+      x={run.x.toFixed(2)}
+      y={run.y.toFixed(2)}
+      fontSize={run.size.toFixed(2)}
+      className={`${styles[run.face]} ${inkClass[run.ink]}`}
+    >
       {run.text}
     </tspan>
   )

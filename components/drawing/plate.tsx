@@ -2,7 +2,7 @@
 
 import { useId, useMemo } from 'react'
 import { compose, type Viewport } from '@/lib/drawing/compose'
-import type { Sketch } from '@/lib/drawing/sketch'
+import type { Show, Sketch } from '@/lib/drawing/sketch'
 import styles from './plate.module.css'
 import { PlateMarks } from './plate-marks'
 import { PlateLabels } from './plate-labels'
@@ -12,7 +12,8 @@ import { useWidthStep, type WidthStep } from './use-width-step'
 export type PlateShape = 'plate' | 'strip' | 'trim'
 
 interface PlateProps {
-  sketch: Sketch
+  /** The drawing, or how to draw it at the detail that its width holds. */
+  sketch: Sketch | ((detail: Show['detail']) => Sketch)
   /** What the drawing is of; its numbers are said by the sketch itself. */
   title: string
   tone?: 'plate' | 'paper'
@@ -24,7 +25,14 @@ interface PlateProps {
 }
 
 const heights: Readonly<Record<WidthStep, number>> = { 300: 290, 340: 310, 480: 400, 640: 500, 760: 590, 960: 660 }
-const textScales: Readonly<Record<WidthStep, number>> = { 300: 0.72, 340: 0.76, 480: 0.86, 640: 0.95, 760: 1, 960: 1.05 }
+const textScales: Readonly<Record<WidthStep, number>> = {
+  300: 0.72,
+  340: 0.76,
+  480: 0.86,
+  640: 0.95,
+  760: 1,
+  960: 1.05,
+}
 
 function viewportOf(step: WidthStep, shape: PlateShape): Viewport {
   const height = shape === 'strip' ? Math.round(step * 0.42) : heights[step]
@@ -35,7 +43,10 @@ function viewportOf(step: WidthStep, shape: PlateShape): Viewport {
 export function Plate({ sketch, title, tone = 'plate', shape = 'plate', highlight = null, onHighlight }: PlateProps) {
   const id = useId()
   const [frame, step] = useWidthStep()
-  const composed = useMemo(() => compose(sketch, viewportOf(step, shape)), [sketch, step, shape])
+  const composed = useMemo(() => {
+    const drawn = typeof sketch === 'function' ? sketch(step < 480 ? 'compact' : 'full') : sketch
+    return compose(drawn, viewportOf(step, shape))
+  }, [sketch, step, shape])
   const plate = useEased(composed)
   const point = (target: EventTarget) =>
     onHighlight?.(target instanceof Element ? (target.closest('[data-part]')?.getAttribute('data-part') ?? null) : null)

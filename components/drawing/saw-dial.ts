@@ -36,16 +36,39 @@ export const draw: Drawing<Given, SawDialAnswer> = (given, solved, show) => {
 }
 
 function stockStrokes(overRange: boolean): Stroke[] {
-  if (!overRange) return [outline('object', [spot(-stockReach, -0.1), spot(stockReach, -0.1), spot(stockReach, -stockDepth), spot(-stockReach, -stockDepth)], 'face')]
+  if (!overRange)
+    return [
+      outline(
+        'object',
+        [
+          spot(-stockReach, -0.1),
+          spot(stockReach, -0.1),
+          spot(stockReach, -stockDepth),
+          spot(-stockReach, -stockDepth),
+        ],
+        'face',
+      ),
+    ]
   const half = stockDepth / 2
   return [
-    outline('ghost', [spot(-half - 3, -0.1), spot(-half - 0.1, -0.1), spot(-half - 0.1, -4.6), spot(-half - 3, -4.6)], 'face'),
+    outline(
+      'ghost',
+      [spot(-half - 3, -0.1), spot(-half - 0.1, -0.1), spot(-half - 0.1, -4.6), spot(-half - 3, -4.6)],
+      'face',
+    ),
     outline('object', [spot(-half, -0.1), spot(half, -0.1), spot(half, -5.2), spot(-half, -5.2)], 'face'),
   ]
 }
 
 function scaleStrokes(last: number): Stroke[] {
-  const arc = (radius: number): Stroke => ({ kind: 'arc', centre: spot(0, 0), radius: { inches: radius }, from: way(-last), to: way(last), ink: 'dim' })
+  const arc = (radius: number): Stroke => ({
+    kind: 'arc',
+    centre: spot(0, 0),
+    radius: { inches: radius },
+    from: way(-last),
+    to: way(last),
+    ink: 'dim',
+  })
   const ticks: Stroke[] = []
   for (let mark = -last; mark <= last; mark += 5) {
     const long = mark % 15 === 0 ? 0.5 : 0.28
@@ -61,23 +84,83 @@ function labelsOf(given: Given, solved: SawDialAnswer, show: Show, setting: numb
   for (let mark = -last; mark <= last; mark += 15) {
     const out = way(mark)
     const shown = { size: 'note', required: false, worth: 1, reach: 8, leader: false } as const
-    marks.push({ ...shown, kind: 'at', text: [[number(String(Math.abs(mark)), 'quiet')]], spot: onDialAt(mark, innerRadius - 0.5), prefer: [out + 180], gap: 4 })
-    marks.push({ ...shown, kind: 'at', text: [[number(String(90 - Math.abs(mark)), 'quiet')]], spot: onDialAt(mark, outerRadius + 0.5), prefer: [out], gap: 4 })
+    marks.push({
+      ...shown,
+      kind: 'at',
+      text: [[number(String(Math.abs(mark)), 'quiet')]],
+      spot: onDialAt(mark, innerRadius - 0.5),
+      prefer: [out + 180],
+      gap: 4,
+    })
+    marks.push({
+      ...shown,
+      kind: 'at',
+      text: [[number(String(90 - Math.abs(mark)), 'quiet')]],
+      spot: onDialAt(mark, outerRadius + 0.5),
+      prefer: [out],
+      gap: 4,
+    })
   }
   return [
-    { kind: 'at', text: readingText(solved, show), size: 'answer', spot: end, prefer: [way(setting), -60, -30, -90, 0], gap: 6, required: true },
+    {
+      kind: 'at',
+      text: readingText(solved, show),
+      size: 'answer',
+      spot: end,
+      prefer: [way(setting), -60, -30, -90, 0],
+      gap: 6,
+      required: true,
+    },
     ...marks,
-    { kind: 'along', text: [[word('fence')]], size: 'note', from: spot(-stockReach, 0.3), to: spot(-2, 0.3), side: 'above', gap: 6, required: false },
+    {
+      kind: 'along',
+      text: [[word('fence')]],
+      size: 'note',
+      from: spot(-stockReach, 0.3),
+      to: spot(-2, 0.3),
+      side: 'above',
+      gap: 6,
+      required: false,
+    },
     ...(solved.overRange
-      ? [{ kind: 'at', text: [[word('squared block')]], size: 'note', spot: spot(-stockDepth / 2 - 3, -2.4), prefer: [180, 150, -150], gap: 8, required: true } as const]
-      : [{ kind: 'along', text: [[word('stock')]], size: 'note', from: spot(-stockReach, -stockDepth / 2), to: spot(-3, -stockDepth / 2), side: 'within', required: false } as const]),
-    { kind: 'at', text: [[word('0 and 90 are square')]], size: 'note', spot: nudged(onDialAt(0, outerRadius + 0.5), -90, 18), prefer: [-90, -120, -150, 180], gap: 6, required: false },
+      ? [
+          {
+            kind: 'at',
+            text: [[word('squared block')]],
+            size: 'note',
+            spot: spot(-stockDepth / 2 - 3, -2.4),
+            prefer: [180, 150, -150],
+            gap: 8,
+            required: true,
+          } as const,
+        ]
+      : [
+          {
+            kind: 'along',
+            text: [[word('stock')]],
+            size: 'note',
+            from: spot(-stockReach, -stockDepth / 2),
+            to: spot(-3, -stockDepth / 2),
+            side: 'within',
+            required: false,
+          } as const,
+        ]),
+    {
+      kind: 'at',
+      text: [[word('0 and 90 are square')]],
+      size: 'note',
+      spot: nudged(onDialAt(0, outerRadius + 0.5), -90, 18),
+      prefer: [-90, -120, -150, 180],
+      gap: 6,
+      required: false,
+    },
     ...overLabel(given, solved),
   ]
 }
 
 function readingText(solved: SawDialAnswer, show: Show) {
-  if (solved.overRange && solved.ifOverRange !== null) return [[word('set ', 'cut'), ...dial(solved.ifOverRange, show, 'cut')], [word('off the turned stock')]]
+  if (solved.overRange && solved.ifOverRange !== null)
+    return [[word('set ', 'cut'), ...dial(solved.ifOverRange, show, 'cut')], [word('off the turned stock')]]
   return [
     [word('reads ', 'cut'), ...dial(solved.squareIs0, show, 'cut')],
     [word('or '), ...dial(solved.squareIs90, show, 'quiet'), word(' where square reads 90')],
@@ -86,7 +169,19 @@ function readingText(solved: SawDialAnswer, show: Show) {
 
 function overLabel({ fromSquare, sawMax }: Given, { overRange }: SawDialAnswer): LabelRequest[] {
   if (!overRange) return []
-  return [{ kind: 'at', text: [[...degrees(fromSquare, 2), word(' is past this saw’s '), ...degrees(sawMax, 1)]], size: 'note', spot: spot(stockDepth / 2, -3), prefer: [0, 20], gap: 60, reach: 160, required: false, leader: false }]
+  return [
+    {
+      kind: 'at',
+      text: [[...degrees(fromSquare, 2), word(' is past this saw’s '), ...degrees(sawMax, 1)]],
+      size: 'note',
+      spot: spot(stockDepth / 2, -3),
+      prefer: [0, 20],
+      gap: 60,
+      reach: 160,
+      required: false,
+      leader: false,
+    },
+  ]
 }
 
 function saysOf({ fromSquare, sawMax }: Given, solved: SawDialAnswer, show: Show): string {

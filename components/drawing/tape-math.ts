@@ -28,10 +28,17 @@ export const draw: Drawing<Given, Solved> = (given, solved, show) => {
   const isExact = Math.abs(given.decimalIn - solved.nearest) < 1e-6
   return {
     strokes: [
-      outline('tape', [spot(first, 0, -14), spot(last, 0, 14), spot(last, 0, 14, -stripHeight), spot(first, 0, -14, -stripHeight)], 'tape', { passable: true }),
+      outline(
+        'tape',
+        [spot(first, 0, -14), spot(last, 0, 14), spot(last, 0, 14, -stripHeight), spot(first, 0, -14, -stripHeight)],
+        'tape',
+        { passable: true },
+      ),
       shade(solved.nearest, den),
       ...marks,
-      ...[solved.nearest - 1 / den, solved.nearest + 1 / den].filter((x) => x >= 0).map((x) => path('ext', [spot(x, 0, 0, -graduations[1] - 4), spot(x, 0, 0, -stripHeight - 18)])),
+      ...[solved.nearest - 1 / den, solved.nearest + 1 / den]
+        .filter((x) => x >= 0)
+        .map((x) => path('ext', [spot(x, 0, 0, -graduations[1] - 4), spot(x, 0, 0, -stripHeight - 18)])),
       path('cut', [spot(given.decimalIn, 0, 0, 34), spot(given.decimalIn, 0, 0, 0)]),
     ],
     labels: labelsOf(given, solved, read, { first, last, isExact }),
@@ -42,7 +49,12 @@ export const draw: Drawing<Given, Solved> = (given, solved, show) => {
 /** The nearest mark stands in a shadow of its own. */
 function shade(x: number, den: number): Stroke {
   const half = 0.42 / den
-  return outline('tape', [spot(x - half, 0), spot(x + half, 0), spot(x + half, 0, 0, -stripHeight), spot(x - half, 0, 0, -stripHeight)], 'shade', { passable: true })
+  return outline(
+    'tape',
+    [spot(x - half, 0), spot(x + half, 0), spot(x + half, 0, 0, -stripHeight), spot(x - half, 0, 0, -stripHeight)],
+    'shade',
+    { passable: true },
+  )
 }
 
 function tapeOf(den: number): Show['tape'] {
@@ -68,21 +80,56 @@ function markAt(k: number, den: number): Stroke {
   return path('tape', [spot(k / den, 0, 0, -1), spot(k / den, 0, 0, -height)])
 }
 
-function labelsOf({ decimalIn, den }: Given, { nearest, roundingError }: Solved, read: Show, at: { first: number; last: number; isExact: boolean }): LabelRequest[] {
+function labelsOf(
+  { decimalIn, den }: Given,
+  { nearest, roundingError }: Solved,
+  read: Show,
+  at: { first: number; last: number; isExact: boolean },
+): LabelRequest[] {
   const labels: LabelRequest[] = [
     {
-      kind: 'at', size: 'answer', required: true, gap: 6, spot: spot(decimalIn, 0, 0, 34), prefer: [90, 60, 120],
-      text: [length(nearest, read, 'cut'), [number(decimalText(decimalIn), 'quiet'), word(at.isExact ? ' in, on the mark' : ` in, off by ${Math.abs(roundingError).toFixed(4)}`)]],
+      kind: 'at',
+      size: 'answer',
+      required: true,
+      gap: 6,
+      spot: spot(decimalIn, 0, 0, 34),
+      prefer: [90, 60, 120],
+      text: [
+        length(nearest, read, 'cut'),
+        [
+          number(decimalText(decimalIn), 'quiet'),
+          word(at.isExact ? ' in, on the mark' : ` in, off by ${Math.abs(roundingError).toFixed(4)}`),
+        ],
+      ],
     },
   ]
   for (let inch = Math.ceil(at.first - 1e-9); inch <= at.last + 1e-9; inch++) {
     labels.push({
-      kind: 'at', text: [[number(String(inch), 'on-tape')]], size: 'number', spot: spot(inch, 0, 0, -56), prefer: [-90, -45, -135], gap: 3, reach: 8, required: false, leader: false,
+      kind: 'at',
+      text: [[number(String(inch), 'on-tape')]],
+      size: 'number',
+      spot: spot(inch, 0, 0, -56),
+      prefer: [-90, -45, -135],
+      gap: 3,
+      reach: 8,
+      required: false,
+      leader: false,
     })
   }
-  for (const [side, value] of [[-120, nearest - 1 / den], [-60, nearest + 1 / den]] as const) {
+  for (const [side, value] of [
+    [-120, nearest - 1 / den],
+    [-60, nearest + 1 / den],
+  ] as const) {
     if (value < 0) continue
-    labels.push({ kind: 'at', text: [length(value, read)], size: 'number', spot: spot(value, 0, 0, -stripHeight - 18), prefer: [side, -90], gap: 5, required: true })
+    labels.push({
+      kind: 'at',
+      text: [length(value, read)],
+      size: 'number',
+      spot: spot(value, 0, 0, -stripHeight - 18),
+      prefer: [side, -90],
+      gap: 5,
+      required: true,
+    })
   }
   return labels
 }

@@ -1,4 +1,14 @@
-import { boxesTouch, extentOfBox, noExtent, segmentsCross, segmentTouches, union, type Box, type Extent, type Point } from './boxes'
+import {
+  boxesTouch,
+  extentOfBox,
+  noExtent,
+  segmentsCross,
+  segmentTouches,
+  union,
+  type Box,
+  type Extent,
+  type Point,
+} from './boxes'
 import type { Mark } from './plate'
 import type { Ink } from './sketch'
 
@@ -28,9 +38,14 @@ export class Field {
       const b = mark.points[(i + 1) % mark.points.length]
       if (!a || !b) continue
       const segment = {
-        a, b, half, ink: mark.ink,
-        left: Math.min(a.x, b.x) - half, right: Math.max(a.x, b.x) + half,
-        top: Math.min(a.y, b.y) - half, bottom: Math.max(a.y, b.y) + half,
+        a,
+        b,
+        half,
+        ink: mark.ink,
+        left: Math.min(a.x, b.x) - half,
+        right: Math.max(a.x, b.x) + half,
+        top: Math.min(a.y, b.y) - half,
+        bottom: Math.max(a.y, b.y) + half,
       }
       if (!mark.passable) this.segments.push(segment)
       this.extent = union(this.extent, segment)
@@ -59,7 +74,8 @@ export class Field {
     const top = box.y - down - clearance
     const bottom = box.y + down + clearance
     for (const { box: other, extent: e } of this.boxes) {
-      if (left <= e.right && e.left <= right && top <= e.bottom && e.top <= bottom && boxesTouch(box, other, clearance)) return false
+      if (left <= e.right && e.left <= right && top <= e.bottom && e.top <= bottom && boxesTouch(box, other, clearance))
+        return false
     }
     for (const s of this.segments) {
       if (left > s.right || s.left > right || top > s.bottom || s.top > bottom) continue

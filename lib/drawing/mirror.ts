@@ -15,7 +15,8 @@ function mirrorStroke(stroke: Stroke): Stroke {
 
 function mirrorLabel(label: LabelRequest): LabelRequest {
   const text = label.text.map(mirrorLine)
-  if (label.kind === 'at') return { ...label, text, spot: across(label.spot), prefer: label.prefer.map((way) => 180 - way) }
+  if (label.kind === 'at')
+    return { ...label, text, spot: across(label.spot), prefer: label.prefer.map((way) => 180 - way) }
   const ends = { from: across(label.from), to: across(label.to) }
   if (label.kind === 'along') return { ...label, ...ends, text }
   return { ...label, ...ends, text, side: label.side === 'left' ? 'right' : 'left' }

@@ -29,7 +29,7 @@ export function placeAt(request: LabelAt, projection: Projection, field: Field):
 
 function distances(gap: number, reach: number): number[] {
   const all = [gap]
-  for (let d = gap; d < reach; ) {
+  for (let d = gap; d < reach;) {
     d += Math.max(5, d * 0.34)
     all.push(Math.min(d, reach))
   }
@@ -43,7 +43,14 @@ function ways(prefer: readonly number[]): readonly number[] {
   return [...prefer, ...everyWay.toSorted((a, b) => off(a) - off(b) || a - b)]
 }
 
-function tryAt(request: LabelAt, projection: Projection, field: Field, spot: Point, way: number, distance: number): Placement | null {
+function tryAt(
+  request: LabelAt,
+  projection: Projection,
+  field: Field,
+  spot: Point,
+  way: number,
+  distance: number,
+): Placement | null {
   const direction = { x: Math.cos((way * Math.PI) / 180), y: -Math.sin((way * Math.PI) / 180) }
   const align = direction.x > 0.5 ? 'start' : direction.x < -0.5 ? 'end' : 'middle'
   const body = bodyOf(request, projection, align)
@@ -60,7 +67,14 @@ function tryAt(request: LabelAt, projection: Projection, field: Field, spot: Poi
 }
 
 /** A hair line from the spot to the near edge of its label, which may cross no other label. */
-function withLeader(spot: Point, box: Box, projection: Projection, field: Field, placement: Placement, part?: string): Placement | null {
+function withLeader(
+  spot: Point,
+  box: Box,
+  projection: Projection,
+  field: Field,
+  placement: Placement,
+  part?: string,
+): Placement | null {
   const end = {
     x: Math.min(Math.max(spot.x, box.x - box.halfWidth), box.x + box.halfWidth),
     y: Math.min(Math.max(spot.y, box.y - box.halfHeight), box.y + box.halfHeight),
@@ -70,6 +84,12 @@ function withLeader(spot: Point, box: Box, projection: Projection, field: Field,
   const a = moved(spot, toward, 3)
   const b = moved(end, toward, -4)
   if (!field.isClear(a, b, clearance)) return null
-  const leader = { points: [a, b], closed: false, ink: 'ext' as const, width: inkWidths.ext * projection.lineScale, part }
+  const leader = {
+    points: [a, b],
+    closed: false,
+    ink: 'ext' as const,
+    width: inkWidths.ext * projection.lineScale,
+    part,
+  }
   return { ...placement, marks: [leader], cost: 1.5 + field.crossings(a, b, solid) * 3 }
 }

@@ -32,9 +32,9 @@ export function placeDimension(request: Dimension, projection: Projection, field
     const label = labelOn(run, request, body, field, marks, scale)
     if (!label) continue
     const crossed = field.crossings(run.from, run.to, kept)
-    // A line through the object misleads more than one that stands far off.
-    if (crossed > 0 && i < 5) continue
-    return { ...label, marks, cost: label.cost + i * 0.8 + crossed * 4 }
+    // A line through the object misleads more than one that stands far off; at 0 it is drawn on the thing itself.
+    if (crossed > 0 && i < 5 && request.offset !== 0) continue
+    return { ...label, marks, cost: label.cost + i * 0.8 + (request.offset === 0 ? 0 : crossed * 4) }
   }
   return null
 }
@@ -62,11 +62,17 @@ function runAt({ from, to, side, measure = 'aligned' }: Dimension, projection: P
 function marksOf({ from, to, out, a, b }: Run, request: Dimension, projection: Projection): Mark[] {
   const ink = request.ink ?? 'dim'
   const line = (points: Point[], which: Ink): Mark => ({
-    points, closed: false, ink: which, width: inkWidths[which] * projection.lineScale, part: request.part,
+    points,
+    closed: false,
+    ink: which,
+    width: inkWidths[which] * projection.lineScale,
+    part: request.part,
   })
   const extension = (at: Point, end: Point) => {
     const reach = (end.x - at.x) * out.x + (end.y - at.y) * out.y
-    return reach > 10 * projection.textScale ? [line([moved(at, out, 4), moved(end, out, 5 * projection.textScale)], 'ext')] : []
+    return reach > 10 * projection.textScale
+      ? [line([moved(at, out, 4), moved(end, out, 5 * projection.textScale)], 'ext')]
+      : []
   }
   return [line([from, to], ink), tick(from, from, to), tick(to, from, to), ...extension(a, from), ...extension(b, to)]
 
@@ -81,12 +87,24 @@ function marksOf({ from, to, out, a, b }: Run, request: Dimension, projection: P
 function isClearMark(mark: Mark, field: Field, scale: number): boolean {
   const [a, b] = mark.points
   if (!a || !b) return true
-  const extent = { left: Math.min(a.x, b.x), right: Math.max(a.x, b.x), top: Math.min(a.y, b.y), bottom: Math.max(a.y, b.y) }
+  const extent = {
+    left: Math.min(a.x, b.x),
+    right: Math.max(a.x, b.x),
+    top: Math.min(a.y, b.y),
+    bottom: Math.max(a.y, b.y),
+  }
   return field.holds(extent) && field.isClear(a, b, clearance * scale)
 }
 
 /** Words above their line, else below it, else past its end; clear of the ticks and of its own lines. */
-function labelOn(run: Run, request: Dimension, body: Body, field: Field, marks: Mark[], scale: number): Omit<Placement, 'marks'> | null {
+function labelOn(
+  run: Run,
+  request: Dimension,
+  body: Body,
+  field: Field,
+  marks: Mark[],
+  scale: number,
+): Omit<Placement, 'marks'> | null {
   const turn = uprightTurn(run.from, run.to)
   const angle = (turn * Math.PI) / 180
   const up = { x: Math.sin(angle), y: -Math.cos(angle) }
@@ -94,7 +112,8 @@ function labelOn(run: Run, request: Dimension, body: Body, field: Field, marks: 
   const length = Math.hypot(run.to.x - run.from.x, run.to.y - run.from.y)
   const roomy = body.halfWidth * 2 + 18 * scale < length
   const gap = (roomy ? 5 : 9) * scale + body.halfHeight
-  const [first, last] = along.x * (run.to.x - run.from.x) + along.y * (run.to.y - run.from.y) >= 0 ? [run.from, run.to] : [run.to, run.from]
+  const [first, last] =
+    along.x * (run.to.x - run.from.x) + along.y * (run.to.y - run.from.y) >= 0 ? [run.from, run.to] : [run.to, run.from]
   const past = 11 * scale + body.halfWidth
   const middle = between(run.from, run.to, 0.5)
   const inner = roomy ? shares : [0.5]

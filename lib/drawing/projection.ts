@@ -17,7 +17,12 @@ export function project({ x, y, dx = 0, dy = 0 }: Spot, { scale, textScale }: Pr
 
 /** A stroke as it will be drawn. */
 export function markOf(stroke: Stroke, projection: Projection): Mark {
-  const shared = { ink: stroke.ink, width: inkWidths[stroke.ink] * projection.lineScale, part: stroke.part, passable: stroke.passable }
+  const shared = {
+    ink: stroke.ink,
+    width: inkWidths[stroke.ink] * projection.lineScale,
+    part: stroke.part,
+    passable: stroke.passable,
+  }
   if (stroke.kind === 'arc') return { ...shared, points: arcPoints(stroke, projection), closed: false }
   return {
     ...shared,

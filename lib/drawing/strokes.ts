@@ -18,16 +18,31 @@ export function nudged(from: Spot, degrees: number, px: number): Spot {
 }
 
 /** A line through these spots. */
-export const path = (ink: Ink, points: readonly Spot[], extra?: Extra): PathStroke => ({ kind: 'path', ink, points, ...extra })
+export const path = (ink: Ink, points: readonly Spot[], extra?: Extra): PathStroke => ({
+  kind: 'path',
+  ink,
+  points,
+  ...extra,
+})
 
 /** A closed outline, filled or open. */
 export const outline = (ink: Ink, points: readonly Spot[], fill?: Fill, extra?: Extra): PathStroke => ({
-  kind: 'path', ink, points, closed: true, fill, ...extra,
+  kind: 'path',
+  ink,
+  points,
+  closed: true,
+  fill,
+  ...extra,
 })
 
 /** An arc of a radius on paper, px; degrees from level, counterclockwise. */
 export const angleArc = (centre: Spot, paper: number, from: number, to: number, ink: Ink = 'dim'): ArcStroke => ({
-  kind: 'arc', centre, radius: { paper }, from, to, ink,
+  kind: 'arc',
+  centre,
+  radius: { paper },
+  from,
+  to,
+  ink,
 })
 
 /** The filled triangle at a long point: its tip on the corner, its back toward `way` degrees. */

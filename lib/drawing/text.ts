@@ -31,7 +31,10 @@ export function inchesOnly(inches: number, show: Show, ink?: LabelInk): Line {
   return tapeLine({ ...parts, feet: 0, inches: parts.feet * 12 + parts.inches }, ink)
 }
 
-function tapeLine({ negative, feet, inches: whole, numerator, denominator }: ReturnType<typeof tapeParts>, ink?: LabelInk): Line {
+function tapeLine(
+  { negative, feet, inches: whole, numerator, denominator }: ReturnType<typeof tapeParts>,
+  ink?: LabelInk,
+): Line {
   const sign = negative ? '−' : ''
   const hasFraction = numerator > 0
   const runs: Run[] = feet > 0 ? [number(`${sign}${feet}`, ink), word('′', ink ?? 'text')] : []

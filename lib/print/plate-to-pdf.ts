@@ -1,0 +1,81 @@
+import path from 'node:path'
+import { inkDashes } from '@/lib/drawing/inks'
+import type { Mark, PlacedLabel, PlacedRun, Plate } from '@/lib/drawing/plate'
+import { shapeOutline } from '@/lib/drawing/shapes'
+import type { Fill, Ink } from '@/lib/drawing/sketch'
+
+type Pdf = PDFKit.PDFDocument
+
+/** WOFF of one weight each: from WOFF2 pdfkit embeds empty glyphs, and it cannot pick a weight of a variable file. */
+const fonts = path.join(process.cwd(), 'fonts', 'print')
+const faces = { mono: 'drawing numbers', word: 'drawing words' } as const
+
+/** Black on white: what is cut and what is wrong stay black, what only explains is grey. */
+const lineColours: Readonly<Record<Ink, string>> = {
+  object: '#000',
+  cut: '#000',
+  off: '#000',
+  flag: '#000',
+  tape: '#000',
+  dim: '#333',
+  centre: '#444',
+  ext: '#777',
+  hatch: '#999',
+  ghost: '#888',
+  post: '#777',
+}
+const fillColours: Readonly<Record<Fill, string | null>> = {
+  face: '#eeeeee',
+  solid: '#000',
+  'off-face': '#dddddd',
+  tape: '#f4f4f4',
+  shade: '#d8d8d8',
+  ground: '#fff',
+}
+
+/** Makes the two faces of a drawing known to a document; once a document, before drawPlate. */
+export function registerDrawingFonts(doc: Pdf): void {
+  doc.registerFont(faces.mono, path.join(fonts, 'atkinson-hyperlegible-mono-latin-600-normal.woff'))
+  doc.registerFont(faces.word, path.join(fonts, 'barlow-condensed-latin-600-normal.woff'))
+}
+
+/** Draws a composed plate with its upper left corner at x, y; `pointsPerPx` sizes it (0.75 is its own size on paper). */
+export function drawPlate(doc: Pdf, plate: Plate, at: { x: number; y: number; pointsPerPx: number }): void {
+  doc.save()
+  doc.translate(at.x, at.y).scale(at.pointsPerPx)
+  for (const mark of plate.marks) drawMark(doc, mark)
+  for (const label of plate.labels) drawLabel(doc, label)
+  doc.restore()
+}
+
+function drawMark(doc: Pdf, { points, closed, ink, fill, width }: Mark): void {
+  const [first, ...rest] = points
+  if (!first) return
+  doc.lineWidth(width).lineJoin('round').undash()
+  const dash = inkDashes[ink]
+  if (dash) doc.dash(dash[0] ?? 4, { space: dash[1] ?? 4 })
+  doc.moveTo(first.x, first.y)
+  for (const point of rest) doc.lineTo(point.x, point.y)
+  if (closed) doc.closePath()
+  const inside = fill && fillColours[fill]
+  if (inside) doc.fillAndStroke(inside, lineColours[ink])
+  else doc.stroke(lineColours[ink])
+}
+
+function drawLabel(doc: Pdf, label: PlacedLabel): void {
+  const isDisc = label.badge === 'disc'
+  if (isDisc) doc.circle(label.box.x, label.box.y, label.box.halfWidth).fill('#000')
+  doc.save()
+  doc.translate(label.x, label.y).rotate(label.turn)
+  for (const run of label.runs) drawRun(doc, run, isDisc ? '#fff' : run.ink === 'quiet' ? '#333' : '#000')
+  doc.restore()
+}
+
+function drawRun(doc: Pdf, run: PlacedRun, colour: string): void {
+  if (run.kind === 'text') {
+    doc.font(faces[run.face]).fontSize(run.size).fillColor(colour)
+    doc.text(run.text, run.x, run.y, { lineBreak: false, baseline: 'alphabetic' })
+    return
+  }
+  doc.polygon(...shapeOutline(run).map(({ x, y }): [number, number] => [x, y])).fill(colour)
+}
