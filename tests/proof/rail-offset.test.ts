@@ -19,7 +19,8 @@ import { railPath } from '@/tests/support/rail-path'
 const within = 1e-6
 
 const apart = (a: Spot, b: Spot) => Math.hypot(a.x - b.x, a.y - b.y)
-const nearest = (to: Spot, among: readonly Spot[]) => among.reduce((best, spot) => (apart(spot, to) < apart(best, to) ? spot : best))
+const nearest = (to: Spot, among: readonly Spot[]) =>
+  among.reduce((best, spot) => (apart(spot, to) < apart(best, to) ? spot : best))
 
 /** A random rail that can be built; others are passed over. */
 function compared(compare: (field: HandrailInputs, rail: HandrailOutputs) => void) {
@@ -64,7 +65,12 @@ describe('the whole rail against offset geometry', () => {
       const band = bandUnder(railPath(field), field.section.depth)
       for (const part of parts) {
         const { topA, topB, undersideA, undersideB } = part.corners
-        const [ta, tb, ua, ub] = [topA, topB, undersideA, undersideB].map((corner) => nearest(corner, band)) as [Spot, Spot, Spot, Spot]
+        const [ta, tb, ua, ub] = [topA, topB, undersideA, undersideB].map((corner) => nearest(corner, band)) as [
+          Spot,
+          Spot,
+          Spot,
+          Spot,
+        ]
         const ahead = { x: (tb.x - ta.x) / apart(ta, tb), y: (tb.y - ta.y) / apart(ta, tb) }
         const along = [ta, tb, ua, ub].map(({ x, y }) => x * ahead.x + y * ahead.y)
         const plan = [part.endA, part.endB].filter(({ longPoint }) => longPoint === 'room side (plan)').length

@@ -12,26 +12,24 @@ function boundAt({ sizes, counts, capacity }: Sizes, threshold: number): number 
   let alone = 0
   let room = 0
   let middle = 0
-  for (const [i, size] of sizes.entries()) {
+  for (let i = 0; i < sizes.length; i++) {
+    const size = sizes[i] ?? 0
     const count = counts[i] ?? 0
+    if (size < threshold - hair) break
     if (size > capacity - threshold + hair) alone += count
     else if (size > capacity / 2 + hair) {
       alone += count
       room += count * (capacity - size)
-    } else if (size >= threshold - hair) middle += count * size
+    } else middle += count * size
   }
   return alone + Math.max(0, sticksFor((middle - room) / capacity))
 }
 
 /** L2 over every threshold that matters; cheap enough to ask at each node of a search. */
 export function halvesBound(packing: Sizes): number {
-  let bound = boundAt(packing, 0)
-  for (const [i, size] of packing.sizes.entries()) {
-    if (size <= packing.capacity / 2 + hair && (packing.counts[i] ?? 0) > 0) {
-      bound = Math.max(bound, boundAt(packing, size))
-    }
-  }
-  return bound
+  const { sizes, counts, capacity } = packing
+  const thresholds = sizes.filter((size, i) => size <= capacity / 2 + hair && (counts[i] ?? 0) > 0)
+  return thresholds.reduce((bound, size) => Math.max(bound, boundAt(packing, size)), boundAt(packing, 0))
 }
 
 /** A share of a stick, sharpened: dual feasible, so shares that fit together still add up to one at most. */

@@ -1,8 +1,6 @@
 import { notNegative, positive } from '../checks'
 import { firstRefusal, refuse, type Refusal } from '../refusal'
-import { lowerBound } from './bound'
-import { quickPacking } from './heuristics'
-import { packInto, type SearchLimits } from './search'
+import { fewest } from './fewest'
 import { fits, groupSizes, type Bar, type Sizes } from './sizes'
 
 export interface CutListGiven {
@@ -27,52 +25,6 @@ export interface CutListAnswer {
   proved: boolean
   /** The same bars as places in `pieces`, counted from 0. */
   at: number[][]
-}
-
-/** Whole numbers only: budgets are subtracted from one another. */
-const unlimited = Number.MAX_SAFE_INTEGER
-
-/** Up to here the search runs to its end, after a short look for a packing that is easily found. */
-const exactUpTo = 20
-const toTheEnd: readonly SearchLimits[] = [
-  { steps: 4_000, perBar: 400, detours: 6 },
-  { steps: unlimited, perBar: unlimited, detours: unlimited },
-]
-/** Beyond, short searches near the fullest bars come before a longer one; steps, not time, so that answers repeat. */
-const inShort: readonly SearchLimits[] = [
-  { steps: 40_000, perBar: 2_000, detours: 1 },
-  { steps: 80_000, perBar: 2_000, detours: 3 },
-  { steps: 120_000, perBar: 4_000, detours: 8 },
-  { steps: 60_000, perBar: unlimited, detours: unlimited },
-]
-
-interface Packed {
-  bars: Bar[]
-  bound: number
-}
-
-/** One search after the other, until one finds a packing or rules it out. */
-function search(packing: Sizes, sticks: number, limits: readonly SearchLimits[]) {
-  let outcome: ReturnType<typeof packInto> = { bars: null, finished: false }
-  for (const limit of limits) {
-    outcome = packInto(packing, sticks, limit)
-    if (outcome.finished) break
-  }
-  return outcome
-}
-
-/** Tries ever more sticks from the lower bound on, until one packing is found or beaten. */
-function fewest(packing: Sizes, pieces: number): Packed {
-  let best = quickPacking(packing)
-  let bound = lowerBound(packing)
-  let ruledOut = true
-  for (let sticks = bound; sticks < best.length; sticks++) {
-    const { bars, finished } = search(packing, sticks, pieces <= exactUpTo ? toTheEnd : inShort)
-    if (bars) best = bars
-    else if (finished && ruledOut) bound = sticks + 1
-    else ruledOut = false
-  }
-  return { bars: best, bound }
 }
 
 function inputFault({ pieces, stock, kerf }: CutListGiven, trim: number): Refusal | null {
@@ -120,7 +72,7 @@ export function cutList(given: CutListGiven): CutListAnswer | Refusal {
   if (fault) return fault
   const usable = stock - trim
   const packing = groupSizes(pieces, usable, kerf)
-  const packed = fewest(packing, pieces.length)
+  const packed = fewest(packing)
   const at = placePieces(packed.bars, packing, pieces, kerf)
   const bars = at.map((bar) => bar.map((place) => pieces[place] ?? 0))
   const used = (bar: number[]) => bar.reduce((sum, piece) => sum + piece + kerf, 0)

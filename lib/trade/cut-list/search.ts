@@ -9,6 +9,9 @@ interface Search extends Sizes {
   hopeless: Set<string>
 }
 
+/** The bound at a node reads every size for every threshold; so many steps of filling take as long. */
+const boundCost = (sizes: number) => (sizes * sizes) / 1000
+
 /**
  * Packs what is left into `sticks` more bars, longest piece first; `null` when it cannot, or the search was cut short.
  * The second-best way to fill a bar costs one detour, the third two.
@@ -18,6 +21,7 @@ function packRest(search: Search, sticks: number, load: number, detours: number)
   const { counts, capacity, budget, hopeless } = search
   const allowed = sticks * capacity - load
   const key = `${sticks}:${counts.join()}`
+  budget.steps -= boundCost(counts.length)
   if (allowed < -hair || hopeless.has(key) || halvesBound(search) > sticks) return null
   for (const [cost, { bar, waste }] of completions(search, Math.max(0, allowed), budget).entries()) {
     if (budget.steps <= 0 || cost > detours) {
@@ -46,5 +50,5 @@ export function packInto(packing: Sizes, sticks: number, { steps, perBar, detour
   const load = packing.sizes.reduce((sum, size, i) => sum + size * (packing.counts[i] ?? 0), 0)
   const search = { ...packing, counts: [...packing.counts], budget, hopeless: new Set<string>() }
   const bars = packRest(search, sticks, load, detours)
-  return { bars, finished: bars !== null || !budget.ranOut }
+  return { bars, finished: bars !== null || !budget.ranOut, spent: steps - budget.steps }
 }

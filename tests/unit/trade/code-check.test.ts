@@ -58,7 +58,10 @@ describe('code rows', () => {
     expect(codeCheck({ ...passing, [field]: 0 })).toMatchObject({ refused: true, field })
   })
 
-  it.each(['topExtension', 'bottomExtensionHoriz', 'wallClearance', 'riserSpread'] as const)('refuses a %s below nothing', (field) => {
-    expect(codeCheck({ ...passing, [field]: -1 })).toMatchObject({ refused: true, field })
-  })
+  it.each(['topExtension', 'bottomExtensionHoriz', 'wallClearance', 'riserSpread'] as const)(
+    'refuses a %s below nothing',
+    (field) => {
+      expect(codeCheck({ ...passing, [field]: -1 })).toMatchObject({ refused: true, field })
+    },
+  )
 })

@@ -11,13 +11,25 @@ describe('knuckle heights', () => {
   })
 
   it('moves over the landing for a higher level run, back for a lower one', () => {
-    expect(knuckles({ pitch, rakeHeight: 34, topLevelHeight: 37 })).toHaveProperty('pastTopNosing', expect.closeTo(4, 9))
-    expect(knuckles({ pitch, rakeHeight: 37, topLevelHeight: 34 })).toHaveProperty('pastTopNosing', expect.closeTo(-4, 9))
+    expect(knuckles({ pitch, rakeHeight: 34, topLevelHeight: 37 })).toHaveProperty(
+      'pastTopNosing',
+      expect.closeTo(4, 9),
+    )
+    expect(knuckles({ pitch, rakeHeight: 37, topLevelHeight: 34 })).toHaveProperty(
+      'pastTopNosing',
+      expect.closeTo(-4, 9),
+    )
   })
 
   it('says nothing of the bottom where its height or first rise was not given', () => {
-    expect(knuckles({ pitch, rakeHeight: 36, topLevelHeight: 36, firstRise: 7 })).toHaveProperty('beforeBottomNosing', null)
-    expect(knuckles({ pitch, rakeHeight: 36, topLevelHeight: 36, bottomLevelHeight: 36 })).toHaveProperty('beforeBottomNosing', null)
+    expect(knuckles({ pitch, rakeHeight: 36, topLevelHeight: 36, firstRise: 7 })).toHaveProperty(
+      'beforeBottomNosing',
+      null,
+    )
+    expect(knuckles({ pitch, rakeHeight: 36, topLevelHeight: 36, bottomLevelHeight: 36 })).toHaveProperty(
+      'beforeBottomNosing',
+      null,
+    )
   })
 
   it.each([

@@ -17,7 +17,12 @@ describe('miter where two runs meet', () => {
   })
 
   it('has no long point where nothing bends, the noise of binary fractions included', () => {
-    expect(miterAt(30, 30 + 1e-13, 1.5, 0.25)).toMatchObject({ bend: 0, longPointFace: 'none', setback: 0, included: 180 })
+    expect(miterAt(30, 30 + 1e-13, 1.5, 0.25)).toMatchObject({
+      bend: 0,
+      longPointFace: 'none',
+      setback: 0,
+      included: 180,
+    })
   })
 
   it('rounds to the step of the dial and says what that costs', () => {

@@ -14,7 +14,9 @@ const miter = fc.double({ min: 0.5, max: 40, noNaN: true })
 
 describe('one piece from one of its lengths', () => {
   it('is a trapezoid where both long points are on top: 45° takes one depth off each end', () => {
-    expect(solved({ length: 20, ref: 'top', depth: 2, miterA: 45, faceA: 'top', miterB: 45, faceB: 'top' })).toMatchObject({
+    expect(
+      solved({ length: 20, ref: 'top', depth: 2, miterA: 45, faceA: 'top', miterB: 45, faceB: 'top' }),
+    ).toMatchObject({
       topEdge: 20,
       centre: expect.closeTo(18, 9),
       underside: expect.closeTo(16, 9),
@@ -24,7 +26,9 @@ describe('one piece from one of its lengths', () => {
   })
 
   it('is a parallelogram where the long points are on opposite faces: edges equal, blank longer by one setback', () => {
-    expect(solved({ length: 20, ref: 'top', depth: 2, miterA: 45, faceA: 'underside', miterB: 45, faceB: 'top' })).toMatchObject({
+    expect(
+      solved({ length: 20, ref: 'top', depth: 2, miterA: 45, faceA: 'underside', miterB: 45, faceB: 'top' }),
+    ).toMatchObject({
       underside: expect.closeTo(20, 9),
       overall: expect.closeTo(22, 9),
       cuts: 'parallel: slide the stock, do not roll it',
@@ -33,14 +37,25 @@ describe('one piece from one of its lengths', () => {
 
   it('comes out the same whichever of its lengths was taped', () => {
     fc.assert(
-      fc.property(miter, face, miter, face, fc.double({ min: 10, max: 200, noNaN: true }), (miterA, faceA, miterB, faceB, length) => {
-        const cut = { depth: 1.5, miterA, faceA, miterB, faceB }
-        const piece = solved({ ...cut, length, ref: 'top' })
-        for (const [ref, from] of [['underside', piece.underside], ['centre', piece.centre], ['overall', piece.overall]] as const) {
-          expect(solved({ ...cut, length: from, ref }).topEdge).toBeCloseTo(length, 9)
-        }
-        expect(piece.overall).toBeGreaterThanOrEqual(Math.max(piece.topEdge, piece.underside) - 1e-9)
-      }),
+      fc.property(
+        miter,
+        face,
+        miter,
+        face,
+        fc.double({ min: 10, max: 200, noNaN: true }),
+        (miterA, faceA, miterB, faceB, length) => {
+          const cut = { depth: 1.5, miterA, faceA, miterB, faceB }
+          const piece = solved({ ...cut, length, ref: 'top' })
+          for (const [ref, from] of [
+            ['underside', piece.underside],
+            ['centre', piece.centre],
+            ['overall', piece.overall],
+          ] as const) {
+            expect(solved({ ...cut, length: from, ref }).topEdge).toBeCloseTo(length, 9)
+          }
+          expect(piece.overall).toBeGreaterThanOrEqual(Math.max(piece.topEdge, piece.underside) - 1e-9)
+        },
+      ),
     )
   })
 
@@ -60,7 +75,16 @@ describe('one piece from one of its lengths', () => {
     ['faceB', { miterB: 10, faceB: 'square' as const }],
     ['length', { length: 2.5, miterA: 45, miterB: 45 }],
   ])('refuses a %s that cannot be cut', (field, wrong) => {
-    const given: PieceGiven = { length: 20, ref: 'top', depth: 2, miterA: 10, faceA: 'top', miterB: 10, faceB: 'top', ...wrong }
+    const given: PieceGiven = {
+      length: 20,
+      ref: 'top',
+      depth: 2,
+      miterA: 10,
+      faceA: 'top',
+      miterB: 10,
+      faceB: 'top',
+      ...wrong,
+    }
     expect(pieceFrom(given)).toMatchObject({ refused: true, field })
   })
 })

@@ -11,7 +11,11 @@ const pitched = (given: Parameters<typeof pitchFrom>[0]) => {
 
 describe('pitch from two tapes', () => {
   it('closes the 3-4-5 triangle from each pair', () => {
-    for (const given of [{ rise: 3, run: 4 }, { rise: 3, rake: 5 }, { run: 4, rake: 5 }]) {
+    for (const given of [
+      { rise: 3, run: 4 },
+      { rise: 3, rake: 5 },
+      { run: 4, rake: 5 },
+    ]) {
       const { rise, run, rake, inPer12 } = pitched(given)
       expect([rise, run, rake, inPer12].map((value) => Number(value.toFixed(9)))).toEqual([3, 4, 5, 9])
     }
@@ -24,12 +28,16 @@ describe('pitch from two tapes', () => {
 
   it('gives one triangle whichever two of its sides were taped', () => {
     fc.assert(
-      fc.property(fc.double({ min: 1, max: 200, noNaN: true }), fc.double({ min: 1, max: 200, noNaN: true }), (rise, run) => {
-        const whole = pitched({ rise, run })
-        const byRise = pitched({ rise, rake: whole.rake })
-        expect(byRise.run).toBeCloseTo(run, 4)
-        expect(pitched({ run, rake: whole.rake }).rise).toBeCloseTo(rise, 4)
-      }),
+      fc.property(
+        fc.double({ min: 1, max: 200, noNaN: true }),
+        fc.double({ min: 1, max: 200, noNaN: true }),
+        (rise, run) => {
+          const whole = pitched({ rise, run })
+          const byRise = pitched({ rise, rake: whole.rake })
+          expect(byRise.run).toBeCloseTo(run, 4)
+          expect(pitched({ run, rake: whole.rake }).rise).toBeCloseTo(rise, 4)
+        },
+      ),
     )
   })
 

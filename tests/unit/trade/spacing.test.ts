@@ -19,12 +19,16 @@ describe('even spacing', () => {
 
   it('never passes the greatest spacing and always ends one end distance short', () => {
     fc.assert(
-      fc.property(fc.double({ min: 13, max: 400, noNaN: true }), fc.double({ min: 1, max: 60, noNaN: true }), (length, most) => {
-        const { spacing, marks } = spaceMarks(length, 6, most)
-        expect(spacing).toBeLessThanOrEqual(most + 1e-6)
-        expect(marks[0]).toBe(6)
-        expect(marks.at(-1)).toBeCloseTo(length - 6, 6)
-      }),
+      fc.property(
+        fc.double({ min: 13, max: 400, noNaN: true }),
+        fc.double({ min: 1, max: 60, noNaN: true }),
+        (length, most) => {
+          const { spacing, marks } = spaceMarks(length, 6, most)
+          expect(spacing).toBeLessThanOrEqual(most + 1e-6)
+          expect(marks[0]).toBe(6)
+          expect(marks.at(-1)).toBeCloseTo(length - 6, 6)
+        },
+      ),
     )
   })
 })

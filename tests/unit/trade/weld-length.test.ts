@@ -5,8 +5,14 @@ import { ellipsePerimeter, weldLength } from '@/lib/trade/weld-length'
 /** Perimeter by walking round the ellipse in ten thousand chords: a second route to the same length. */
 function walked(long: number, short: number): number {
   const steps = 10_000
-  const at = (i: number) => ({ x: (long / 2) * Math.cos((2 * Math.PI * i) / steps), y: (short / 2) * Math.sin((2 * Math.PI * i) / steps) })
-  return Array.from({ length: steps }, (_, i) => Math.hypot(at(i + 1).x - at(i).x, at(i + 1).y - at(i).y)).reduce((a, b) => a + b, 0)
+  const at = (i: number) => ({
+    x: (long / 2) * Math.cos((2 * Math.PI * i) / steps),
+    y: (short / 2) * Math.sin((2 * Math.PI * i) / steps),
+  })
+  return Array.from({ length: steps }, (_, i) => Math.hypot(at(i + 1).x - at(i).x, at(i + 1).y - at(i).y)).reduce(
+    (a, b) => a + b,
+    0,
+  )
 }
 
 describe('weld around a mitered section', () => {
@@ -16,9 +22,13 @@ describe('weld around a mitered section', () => {
 
   it('walks round the same ellipse', () => {
     fc.assert(
-      fc.property(fc.double({ min: 1, max: 4, noNaN: true }), fc.double({ min: 1, max: 4, noNaN: true }), (long, short) => {
-        expect(Math.abs(ellipsePerimeter(long, short) / walked(long, short) - 1)).toBeLessThan(1e-6)
-      }),
+      fc.property(
+        fc.double({ min: 1, max: 4, noNaN: true }),
+        fc.double({ min: 1, max: 4, noNaN: true }),
+        (long, short) => {
+          expect(Math.abs(ellipsePerimeter(long, short) / walked(long, short) - 1)).toBeLessThan(1e-6)
+        },
+      ),
       { numRuns: 30 },
     )
   })
