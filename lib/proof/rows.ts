@@ -1,49 +1,57 @@
 import { z } from 'zod'
+import { computeCalculator } from '@/lib/calculators/compute'
 
-const sentence = z.string().min(3)
-const value = z.union([z.number(), z.string().min(1), z.boolean()])
+const said = z.string().min(3)
 
-/** One printed value: what to give the calculator, and what stands in the print for it. */
-const rowSchema = z.strictObject({
+/** One published value: what to give the calculator, and what the print says comes out. */
+const proofRowSchema = z.strictObject({
+  id: said,
+  quantity: said,
   inputs: z.record(z.string(), z.unknown()),
-  /** In the unit of the set. */
-  printed: value,
-  /** As the print writes it, where that is not the number itself: 32° 8′, 9/64. */
-  printedAs: z.string().min(1).optional(),
-  /** Where this row is printed more coarsely than its set. */
-  tolerance: z.number().nonnegative().optional(),
-  note: sentence.optional(),
-  /** Why the print is taken to be wrong: then it must disagree. */
-  printIsWrong: sentence.optional(),
-})
-
-/** Printed values of one quantity from one source. */
-const setSchema = z.strictObject({
-  quantity: sentence,
-  /** Name of the calculator's output; inside lists and groups a path such as `parts.A.topEdge`. */
+  /** Name of the output that is compared. */
   output: z.string().min(1),
-  unit: z.enum(['in', 'deg', 'sticks', 'yes or no']),
+  /** In the unit of the output. */
+  printed: z.union([z.number(), z.string().min(1), z.boolean()]),
+  /** As the print writes it, where that is not the number itself: 32° 8′. */
+  asPrinted: z.string().min(1).optional(),
   /** What the print's own rounding allows. */
   tolerance: z.number().nonnegative(),
-  source: sentence,
-  where: sentence,
-  provenance: sentence,
   /** A value looked up in the very table that the calculator copies proves the copying only. */
   kind: z.enum(['computed', 'looked-up']),
-  origin: z.enum(['published', 'from memory']),
-  note: sentence.optional(),
-  rows: z.array(rowSchema).min(1),
+  source: said,
+  where: said,
+  provenance: said,
+  note: said.optional(),
+  /** Why the print is taken to be wrong: then it must disagree. */
+  printIsWrong: said.optional(),
 })
 
 /** A file of `content/proof`: published values only, never one of our own working. */
-export const proofFileSchema = z.strictObject({ sets: z.array(setSchema).min(1) })
+export const proofFileSchema = z.strictObject({ calculator: said, rows: z.array(proofRowSchema).min(1) })
 
-type ProofSet = z.infer<typeof setSchema>
+export type ProofRow = z.infer<typeof proofRowSchema>
 
-/** One printed value with all that is said of its set. */
-export type ProofRow = Omit<ProofSet, 'rows'> & z.infer<typeof rowSchema>
+/** A published value beside ours. */
+export interface Compared {
+  row: ProofRow
+  computed: number | string | boolean
+  /** Ours less the print, in the output's unit; null where there is nothing to subtract. */
+  difference: number | null
+  agrees: boolean
+}
 
-/** The rows of a proof file, each by itself. @throws ZodError when the file lacks a source or says something unknown. */
-export function rowsOf(file: unknown): ProofRow[] {
-  return proofFileSchema.parse(file).sets.flatMap(({ rows, ...set }) => rows.map((row) => ({ ...set, ...row })))
+/**
+ * Computes one published row and sets the answer beside the print.
+ * @throws Error when the calculator refuses the inputs or has no such output: then the row itself is wrong.
+ */
+export async function compareRow(calculator: string, row: ProofRow): Promise<Compared> {
+  const answered = await computeCalculator(calculator, row.inputs)
+  if (!answered.ok) throw new Error(`${calculator} ${row.id}: ${JSON.stringify(answered.errors)}`)
+  const computed = answered.answer.outputs[row.output]
+  if (typeof computed !== 'number' && typeof computed !== 'string' && typeof computed !== 'boolean')
+    throw new Error(`${calculator} ${row.id}: there is no ${row.output}`)
+  if (typeof computed !== 'number' || typeof row.printed !== 'number')
+    return { row, computed, difference: null, agrees: computed === row.printed }
+  const difference = computed - row.printed
+  return { row, computed, difference, agrees: Math.abs(difference) <= row.tolerance }
 }

@@ -14,7 +14,12 @@ export function partsOf(value: number, den: number): Parts {
   const ticks = Math.round(Math.abs(value) * den)
   const rest = ticks % den
   const common = divisor(den, rest)
-  return { negative: value < 0 && ticks > 0, whole: Math.floor(ticks / den), numerator: rest / common, denominator: den / common }
+  return {
+    negative: value < 0 && ticks > 0,
+    whole: Math.floor(ticks / den),
+    numerator: rest / common,
+    denominator: den / common,
+  }
 }
 
 /** Whole and fraction as typed: `16 1/4`, `3/8`, `0`. */

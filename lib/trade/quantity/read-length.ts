@@ -33,7 +33,8 @@ function readFeet(text: string): Read | undefined {
   const rest = text.slice(match[0].length).replace(/^\s?-?\s?/, '')
   if (feet === undefined) return { misread: `the feet cannot be read. ${accepted}` }
   if (rest === '') return { value: feet * 12 }
-  if (!Number.isInteger(feet)) return { misread: 'feet with a fraction and inches as well could mean two things; give whole feet and inches.' }
+  if (!Number.isInteger(feet))
+    return { misread: 'feet with a fraction and inches as well could mean two things; give whole feet and inches.' }
   const inches = readUnsigned(rest.replace(inchMark, ''))
   if (inches === undefined) return { misread: `the inches after the feet cannot be read. ${accepted}` }
   if (inches >= 12) return { misread: 'after feet, the inches run from 0 to under 12. Check the reading.' }
@@ -41,7 +42,10 @@ function readFeet(text: string): Read | undefined {
 }
 
 function readInches(text: string): Read {
-  if (/^\d+ \d+$/.test(text)) return { misread: 'two numbers side by side could be feet and inches or something else; mark them, such as 6\' 2".' }
+  if (/^\d+ \d+$/.test(text))
+    return {
+      misread: 'two numbers side by side could be feet and inches or something else; mark them, such as 6\' 2".',
+    }
   const value = readUnsigned(text.replace(inchMark, ''))
   return value === undefined ? { misread: accepted } : { value }
 }

@@ -19,7 +19,8 @@ const suffixes: Record<string, RegExp> = {
  * A bare number is in that unit. What is ambiguous or senseless is refused with what would be accepted.
  */
 export function readQuantity(raw: number | string, unit: string): Read {
-  if (typeof raw === 'number') return Number.isFinite(raw) ? { value: raw } : { misread: 'give a number that can be measured.' }
+  if (typeof raw === 'number')
+    return Number.isFinite(raw) ? { value: raw } : { misread: 'give a number that can be measured.' }
   const text = normalise(raw)
   if (text === undefined) return { misread: 'that is too long for one measure.' }
   if (text === '') return { misread: 'give a number.' }

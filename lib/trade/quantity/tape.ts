@@ -19,6 +19,9 @@ export function tapeParts(inches: number, den: number): TapeParts {
 /** Inches as text to the nearest 1/den: `11'-11 3/8"`, `7/16"`, `-2'-0"`. */
 export function showTape(inches: number, den: number): string {
   const { negative, feet, inches: whole, numerator, denominator } = tapeParts(inches, den)
-  const rest = feet > 0 && whole === 0 && numerator > 0 ? `0 ${numerator}/${denominator}` : showParts({ negative, whole, numerator, denominator })
+  const rest =
+    feet > 0 && whole === 0 && numerator > 0
+      ? `0 ${numerator}/${denominator}`
+      : showParts({ negative, whole, numerator, denominator })
   return `${negative ? '-' : ''}${feet > 0 ? `${feet}'-` : ''}${rest}"`
 }
