@@ -1,6 +1,5 @@
 const radians = Math.PI / 180
 
-export const toRadians = (deg: number) => deg * radians
 export const toDegrees = (rad: number) => rad / radians
 
 export const sinDeg = (deg: number) => Math.sin(deg * radians)

@@ -1,4 +1,4 @@
-import { atanDeg, tanDeg } from '../angles'
+import { cosDeg, sinDeg, tanDeg } from '../angles'
 import { hair } from '../tolerance'
 import type { Point } from './types'
 
@@ -26,11 +26,8 @@ export function meet(lower: Line, upper: Line, joinX: number): Point | null {
 
 /** A point moved along a slope and then square off it, downwards. */
 export function offset(from: Point, slope: number, along: number, down: number): Point {
-  const angle = (slope * Math.PI) / 180
   return {
-    x: from.x + along * Math.cos(angle) + down * Math.sin(angle),
-    y: from.y + along * Math.sin(angle) - down * Math.cos(angle),
+    x: from.x + along * cosDeg(slope) + down * sinDeg(slope),
+    y: from.y + along * sinDeg(slope) - down * cosDeg(slope),
   }
 }
-
-export const slopeBetween = (from: Point, to: Point) => atanDeg(to.y - from.y, to.x - from.x)

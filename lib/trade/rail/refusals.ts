@@ -13,10 +13,7 @@ function landingFaults(landings: readonly Landing[], flights: number): Fault[] {
   const count =
     landings.length === wanted
       ? null
-      : refuse(
-          'landings',
-          `${flights} flight${flights === 1 ? '' : 's'} need ${wanted} landing${wanted === 1 ? '' : 's'} between them.`,
-        )
+      : refuse('landings', `Give one landing fewer than flights: ${wanted}, bottom to top.`)
   return [
     count,
     ...landings.flatMap(({ length, railHeight, slopeInPerFt }, i) => [
