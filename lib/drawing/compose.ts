@@ -7,7 +7,7 @@ import { largestScale, type Room } from './largest-scale'
 import { markOf, type Projection } from './projection'
 import type { LabelRequest, Sketch, Stroke } from './sketch'
 
-/** The paper to fill, px. Paper too small for the sketch grows, height before width. */
+/** The paper to fill, px. Paper too small for the sketch grows. */
 export interface Viewport {
   width: number
   height: number
@@ -33,22 +33,25 @@ interface Attempt {
 const shares = [1, 0.94, 0.88, 0.82, 0.76, 0.7, 0.63, 0.56, 0.49, 0.42, 0.35, 0.28]
 /** What it costs to leave out an optional label that does not say its own worth. */
 const usualWorth = 4
-const mostGrowth = 36
+const mostGrowth = 24
 
 /** Fits a sketch to its paper, to scale, with no label on a line or on another. Pure and repeatable. */
 export function compose(sketch: Sketch, viewport: Viewport): Plate {
   const margin = viewport.margin ?? 18
   const labels = [...sketch.labels.filter((l) => l.required), ...sketch.labels.filter((l) => !l.required)]
+  const textScale = viewport.textScale ?? 1
   let paper: Room = { width: viewport.width, height: viewport.height }
-  for (let growth = 0; growth < mostGrowth; growth++) {
+  for (let growth = 0; ; growth++) {
     const room = { width: paper.width - 2 * margin, height: paper.height - 2 * margin }
-    const largest = largestScale(sketch.strokes, room, viewport.textScale ?? 1)
-    const best = bestAttempt(sketch.strokes, labels, room, largest, viewport)
+    const largest = largestScale(sketch.strokes, room, textScale)
+    const sizes = { textScale, lineScale: viewport.lineScale ?? 1, patience: 1 + growth * 0.5 }
+    // A drawing without one of its labels is better than none, should the largest paper not hold them all.
+    const asked = growth < mostGrowth ? labels : labels.map((label) => ({ ...label, required: false }))
+    const best = bestAttempt(sketch.strokes, asked, room, largest, sizes)
     if (best) return finish(best, sketch, { ...paper, margin, trim: viewport.trim ?? false })
     // Rows of a fixed height want a longer sheet; crowded words want a larger one.
     paper = { width: paper.width * (largest === 0 && growth < 12 ? 1 : 1.1), height: paper.height * 1.15 }
   }
-  throw new Error('A required label of this sketch fits nowhere, however large the paper.')
 }
 
 function bestAttempt(
@@ -56,9 +59,8 @@ function bestAttempt(
   labels: readonly LabelRequest[],
   room: Room,
   largest: number,
-  viewport: Viewport,
+  sizes: Omit<Projection, 'scale'>,
 ): Attempt | null {
-  const sizes = { textScale: viewport.textScale ?? 1, lineScale: viewport.lineScale ?? 1 }
   let best: Attempt | null = null
   for (const share of shares) {
     if (largest === 0 || (best && share * 100 <= best.worth)) break

@@ -14,7 +14,7 @@ const leaderFrom = 15
 export function placeAt(request: LabelAt, projection: Projection, field: Field): Placement | null {
   const spot = project(request.spot, projection)
   const scale = projection.textScale
-  const reach = request.reach ?? (request.required ? 150 : 50)
+  const reach = request.required ? (request.reach ?? 150) * projection.patience : (request.reach ?? 50)
   const farWays = ways(request.prefer)
   for (const distance of distances(request.gap ?? 7, reach)) {
     for (const [rank, way] of (distance < leaderFrom ? request.prefer : farWays).entries()) {

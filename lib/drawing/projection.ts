@@ -8,6 +8,8 @@ export interface Projection {
   scale: number
   textScale: number
   lineScale: number
+  /** Times further than usual a required label may drift: 1 until the paper had to grow. */
+  patience: number
 }
 
 /** Where a spot falls. Its paper offset grows with the text, so that gaps suit the words. */
