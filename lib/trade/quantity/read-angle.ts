@@ -3,6 +3,8 @@ import type { Read } from './read-length'
 
 const accepted = "Write degrees, such as 32.5, 32 1/2 deg or 32° 30'."
 const degreeMark = /\s?(?:°|deg\.?|degree|degrees)$/
+/** A slope in 12 of run, as framing squares have it; no dial is graduated in twelfths. */
+const inTwelve = /^\d+(?:\.\d+)? ?\/ ?12$/
 const parts = /^(\d+)\s?°\s?(\d+(?:\.\d+)?)\s?'(?:\s?(\d+(?:\.\d+)?)\s?")?$/
 
 /** Reads an angle, in degrees, from text that `normalise` brought to one form. */
@@ -12,6 +14,7 @@ export function readAngle(text: string): Read {
   if (bySixtieths) return sixtieths(sign, bySixtieths)
   if (/\d\s?(?:mm|cm|m|in|inch|inches|ft|'|")$/.test(rest))
     return { misread: `that is a length; an angle is wanted. ${accepted}` }
+  if (inTwelve.test(rest)) return { misread: `${rest} could be inches in 12 of run or a part of a degree. ${accepted}` }
   const value = readUnsigned(rest.replace(degreeMark, ''))
   return value === undefined ? { misread: accepted } : { value: sign * value }
 }

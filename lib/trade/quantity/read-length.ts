@@ -1,4 +1,3 @@
-import { mmPerInch } from './metric'
 import { readUnsigned, signed } from './number'
 
 export type Read = { value: number } | { misread: string }
@@ -23,16 +22,18 @@ function readMetric(text: string): Read | undefined {
   const [, digits = '', unit = ''] = match
   const value = digits.includes('/') ? undefined : readUnsigned(digits)
   if (value === undefined) return { misread: `give ${unit} as a decimal, such as 1892 mm.` }
-  return { value: (value * (metric[unit] ?? 1)) / mmPerInch }
+  // 25.4 is 127/5: divided so, 38.1 mm is 1.5 in and not a hair more.
+  return { value: (value * (metric[unit] ?? 1) * 5) / 127 }
 }
 
 function readFeet(text: string): Read | undefined {
   const match = feetMark.exec(text)
   if (!match) return undefined
   const feet = readUnsigned(match[1] ?? '')
-  const rest = text.slice(match[0].length).replace(/^\s?-?\s?/, '')
+  const after = text.slice(match[0].length)
+  const rest = after.replace(/^\s?-?\s?/, '')
   if (feet === undefined) return { misread: `the feet cannot be read. ${accepted}` }
-  if (rest === '') return { value: feet * 12 }
+  if (after === '') return { value: feet * 12 }
   if (!Number.isInteger(feet))
     return { misread: 'feet with a fraction and inches as well could mean two things; give whole feet and inches.' }
   const inches = readUnsigned(rest.replace(inchMark, ''))
