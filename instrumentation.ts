@@ -1,17 +1,10 @@
 import type { Instrumentation } from 'next'
 
-const hourMs = 3600_000
-
-/** Before the first request: settings are checked, addresses stamped, and old answers and counters cleared by the hour. */
+/** Once, before the first request. */
 export async function register(): Promise<void> {
   if (process.env.NEXT_RUNTIME !== 'nodejs') return
-  const { config } = await import('@/lib/config')
-  const { stampAddresses } = await import('@/lib/http/client-address')
-  const { tidy } = await import('@/lib/data/tidy')
-  const { log } = await import('@/lib/log')
-  config()
-  stampAddresses()
-  setInterval(() => void tidy().catch((err: unknown) => log.warn({ err }, 'tidy')), hourMs).unref()
+  const { startUp } = await import('@/lib/start-up')
+  startUp()
 }
 
 /** What a page or route threw past its own handling. */

@@ -32,6 +32,6 @@ export function defineAuditEvent(sequelize: Sequelize) {
       details: DataTypes.JSON,
       at: instantColumn,
     },
-    { sequelize, tableName: 'audit_events', timestamps: false },
+    { sequelize, modelName: 'AuditEvent', tableName: 'audit_events', timestamps: false },
   )
 }

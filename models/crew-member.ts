@@ -24,6 +24,6 @@ export function defineCrewMember(sequelize: Sequelize) {
       place: DataTypes.STRING(20),
       createdAt: instantColumn,
     },
-    { sequelize, tableName: 'crew_members', updatedAt: false },
+    { sequelize, modelName: 'CrewMember', tableName: 'crew_members', updatedAt: false },
   )
 }

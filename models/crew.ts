@@ -27,6 +27,6 @@ export function defineCrew(sequelize: Sequelize) {
       createdAt: instantColumn,
       updatedAt: instantColumn,
     },
-    { sequelize, tableName: 'crews' },
+    { sequelize, modelName: 'Crew', tableName: 'crews' },
   )
 }

@@ -52,6 +52,6 @@ export function defineCutSheet(sequelize: Sequelize) {
       createdAt: instantColumn,
       supersededAt: instantColumn,
     },
-    { sequelize, tableName: 'cut_sheets', updatedAt: false },
+    { sequelize, modelName: 'CutSheet', tableName: 'cut_sheets', updatedAt: false },
   )
 }

@@ -29,6 +29,6 @@ export function defineIdempotencyKey(sequelize: Sequelize) {
       answer: DataTypes.JSON,
       createdAt: instantColumn,
     },
-    { sequelize, tableName: 'idempotency_keys', updatedAt: false },
+    { sequelize, modelName: 'IdempotencyKey', tableName: 'idempotency_keys', updatedAt: false },
   )
 }

@@ -42,6 +42,6 @@ export function defineJob(sequelize: Sequelize) {
       createdAt: instantColumn,
       updatedAt: instantColumn,
     },
-    { sequelize, tableName: 'jobs' },
+    { sequelize, modelName: 'Job', tableName: 'jobs' },
   )
 }

@@ -37,6 +37,6 @@ export function defineOutboxLetter(sequelize: Sequelize) {
       givenUpAt: instantColumn,
       createdAt: instantColumn,
     },
-    { sequelize, tableName: 'outbox', updatedAt: false },
+    { sequelize, modelName: 'OutboxLetter', tableName: 'outbox', updatedAt: false },
   )
 }

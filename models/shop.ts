@@ -25,6 +25,6 @@ export function defineShop(sequelize: Sequelize) {
       createdAt: instantColumn,
       updatedAt: instantColumn,
     },
-    { sequelize, tableName: 'shops' },
+    { sequelize, modelName: 'Shop', tableName: 'shops' },
   )
 }

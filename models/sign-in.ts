@@ -30,6 +30,6 @@ export function defineSignIn(sequelize: Sequelize) {
       endedAt: instantColumn,
       agent: DataTypes.STRING(200),
     },
-    { sequelize, tableName: 'sign_ins', timestamps: false },
+    { sequelize, modelName: 'SignIn', tableName: 'sign_ins', timestamps: false },
   )
 }

@@ -51,6 +51,6 @@ export function defineUser(sequelize: Sequelize) {
       createdAt: instantColumn,
       updatedAt: instantColumn,
     },
-    { sequelize, tableName: 'users' },
+    { sequelize, modelName: 'User', tableName: 'users' },
   )
 }

@@ -26,6 +26,6 @@ export class PageHashes {
 
   /** Hashes of the pages that stand in where nothing is found. */
   fallback(): readonly string[] {
-    return anywhere.flatMap((page) => this.pages[page] ?? [])
+    return [...new Set(anywhere.flatMap((page) => this.pages[page] ?? []))]
   }
 }
