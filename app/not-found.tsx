@@ -8,10 +8,10 @@ export default function NotFound() {
       <h1>That mark is not on this tape</h1>
       <p className="lede">There is no page at this address. It may have moved, or a letter of the link went missing.</p>
       <div className="flex flex-wrap gap-3">
-        <ButtonLink href="/handbook" variant="primary">
+        <ButtonLink href="/handbook" prefetch={false} variant="primary">
           Open the handbook
         </ButtonLink>
-        <ButtonLink href="/">Front page</ButtonLink>
+        <ButtonLink href="/" prefetch={false}>Front page</ButtonLink>
       </div>
     </article>
   )

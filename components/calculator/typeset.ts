@@ -16,7 +16,9 @@ const { parse } = create(parseDependencies ?? {})
 /** Formulas in math syntax as MathML, which browsers set by themselves: no style sheet, no font, read aloud as mathematics. */
 export function typesetter(calculator: Pick<AnyCalculator, 'inputs' | 'outputs'>): (formula: string) => string {
   const symbol = symbolsOf(calculator)
-  const handler = (node: MathNode & { name?: string }) => (node.type === 'SymbolNode' && node.name !== undefined ? symbol(node.name) : undefined)
+  // A space before the name: what mathjs puts in front (\cdot) would otherwise run into it.
+  const handler = (node: MathNode & { name?: string }) =>
+    node.type === 'SymbolNode' && node.name !== undefined ? ` ${symbol(node.name)}` : undefined
   return (formula) => {
     const tex = parse(formula).toTex({ parenthesis: 'auto', implicit: 'hide', handler })
     return katex.renderToString(tex, { output: 'mathml', throwOnError: true, strict: 'error' })

@@ -12,7 +12,7 @@ export function SiteHeader() {
         Skip to the page
       </a>
       <div className="flex min-h-[68px] items-center gap-9 px-10 max-sm:min-h-[56px] max-sm:gap-4 max-sm:px-4">
-        <Link href="/" className="logo">
+        <Link href="/" prefetch={false} className="logo">
           <Mark />
           Longpoint
         </Link>

@@ -43,7 +43,7 @@ export function Tape({ inches, den, units = 'in', exact }: TapeProps) {
 
 function TapeGlyphs({ inches, den }: { inches: number; den: number }) {
   const parts = tapeParts(inches, den)
-  const bare = parts.inches === 0 && parts.numerator > 0
+  const bare = parts.feet === 0 && parts.inches === 0 && parts.numerator > 0
   return (
     <span aria-hidden="true" className="whitespace-nowrap">
       {parts.negative && '−'}
