@@ -7,28 +7,39 @@ import { Stop } from './stop.mjs'
 /** Programs that ordinary accounts do not have on their path lie in the sbin directories. */
 const searched = [...(process.env.PATH ?? '').split(path.delimiter), '/usr/local/sbin', '/usr/sbin', '/usr/bin']
 
-/** Debian's server without its system service: Longpoint runs a private one, and starts nothing else. */
-export const mariadb = { program: 'mariadbd', packages: ['mariadb-server-core'], what: 'MariaDB' }
-export const chromium = { program: 'chromium', packages: ['chromium'], what: 'Chromium' }
+/**
+ * Debian's server without its system service: Longpoint runs a private one, and starts nothing else. Making an empty
+ * database takes a program of the client's package.
+ */
+export const mariadb = {
+  what: 'MariaDB',
+  programs: ['mariadbd', 'mariadb-install-db', 'my_print_defaults'],
+  packages: ['mariadb-server-core', 'mariadb-client-core'],
+}
+export const chromium = { what: 'Chromium', programs: ['chromium'], packages: ['chromium'] }
 
 type Wanted = typeof mariadb
 
 /** The full path of a program, or undefined when this machine has none. */
-export function find(program: string): string | undefined {
+function find(program: string): string | undefined {
   return searched
     .filter(Boolean)
     .map((directory) => path.join(directory, program))
     .find(isExecutable)
 }
 
-/** The full path of a program, installed with apt-get when missing. Throws Stop with the command to run by hand. */
-export async function ensure(wanted: Wanted): Promise<string> {
-  const found = find(wanted.program)
-  if (found) return found
+/** Have a program and those it needs, installed with apt-get when missing. Throws Stop with the command to run by hand. */
+export async function ensure(wanted: Wanted): Promise<void> {
+  const missing = () => wanted.programs.filter((program) => !find(program))
+  if (missing().length === 0) return
   await install(wanted)
-  const installed = find(wanted.program)
-  if (!installed) throw new Stop(`${wanted.what} was installed, but ${wanted.program} is not where Debian puts it.`)
-  return installed
+  if (missing().length === 0) return
+  throw new Stop(`${wanted.what} was installed, but not where Debian puts it: ${missing().join(', ')}.`)
+}
+
+/** The full path of a program that `ensure` found. */
+export function programPath(program: string): string {
+  return find(program) ?? program
 }
 
 async function install({ packages, what }: Wanted) {
