@@ -16,7 +16,7 @@ const glass = 62
 /** Times the gap is enlarged in the glass, so that it is neither a hair nor wider than the glass. */
 function magnification({ rise, run }: Given, gap: number): number {
   const roughScale = 560 / Math.max(run, rise * 1.5)
-  const wanted = 26 / Math.max(Math.abs(gap) * roughScale, 1e-6)
+  const wanted = 40 / Math.max(Math.abs(gap) * roughScale, 1e-6)
   return [1, 2, 5, 10, 20, 50, 100].findLast((times) => times <= wanted) ?? 1
 }
 

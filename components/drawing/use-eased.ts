@@ -4,6 +4,11 @@ import type { Plate } from '@/lib/drawing/plate'
 
 const easeMs = 140
 
+/** Browsers too old to say are not moved either. */
+function prefersStill(): boolean {
+  return typeof window.matchMedia !== 'function' || window.matchMedia('(prefers-reduced-motion: reduce)').matches
+}
+
 /** Lets a drawing slide to its new numbers, unless the reader asked for less motion or the drawing changed shape. */
 export function useEased(plate: Plate): Plate {
   const [shown, setShown] = useState(plate)
@@ -11,7 +16,7 @@ export function useEased(plate: Plate): Plate {
   useEffect(() => {
     const from = last.current
     if (from === plate) return undefined
-    const still = window.matchMedia('(prefers-reduced-motion: reduce)').matches
+    const still = prefersStill()
     const start = performance.now()
     const settle = () => {
       last.current = plate

@@ -17,6 +17,7 @@ type Align = 'start' | 'middle' | 'end'
 
 const capHeight = 0.7
 const lineHeight = 1.12
+const footMarkShare = 0.55
 const wordAdvances: Readonly<Record<string, number>> = metrics.word
 
 /** A letter that the table lacks is given the widest room, so that it can crowd nothing. */
@@ -64,7 +65,9 @@ function layRun(run: Run, x: number, px: number): { runs: PlacedRun[]; end: numb
   // Primes are set at the size of the number they belong to.
   const size = face === 'word' && !/^[′″]$/.test(run.text) ? px * wordShare : px
   const width = (advance(face, run.text) * size) / 1000
-  return { runs: [{ kind: 'text', face, text: run.text, x, y: 0, size, width, ink }], end: x + width }
+  // The foot mark's own advance leaves a hole before the inches.
+  const end = x + width * (run.text === '′' ? footMarkShare : 1)
+  return { runs: [{ kind: 'text', face, text: run.text, x, y: 0, size, width: end - x, ink }], end }
 }
 
 /** Raised numerator, slash, denominator on the line: one fraction, as high as the figures beside it. */

@@ -37,8 +37,8 @@ export function markOf(stroke: Stroke, projection: Projection): Mark {
 function arcPoints(arc: Extract<Stroke, { kind: 'arc' }>, projection: Projection): Point[] {
   const centre = project(arc.centre, projection)
   const radius = 'inches' in arc.radius ? arc.radius.inches * projection.scale : arc.radius.paper * projection.textScale
-  // Chords of 3° leave the eye no corner at any size a plate has.
-  const steps = Math.max(2, Math.ceil(Math.abs(arc.to - arc.from) / 3))
+  // Chords under 4° leave the eye no corner; always as many, so that an arc can ease to another angle.
+  const steps = Math.abs(arc.to - arc.from) > 120 ? 96 : 32
   return Array.from({ length: steps + 1 }, (_, i) => {
     const turn = ((arc.from + ((arc.to - arc.from) * i) / steps) * Math.PI) / 180
     return { x: centre.x + radius * Math.cos(turn), y: centre.y - radius * Math.sin(turn) }
