@@ -4,7 +4,7 @@ import type { Instrumentation } from 'next'
 export async function register(): Promise<void> {
   if (process.env.NEXT_RUNTIME !== 'nodejs') return
   const { startUp } = await import('@/lib/start-up')
-  startUp()
+  await startUp()
 }
 
 /** What a page or route threw past its own handling. */

@@ -1,12 +1,11 @@
 import { config, ConfigError } from './config'
-import { tidy } from './data/tidy'
 import { stampAddresses } from './http/client-address'
 import { log } from './log'
 
 const hourMs = 3600_000
 
 /** Before the first request: settings are checked, callers' addresses stamped, old answers and counters cleared by the hour. */
-export function startUp(): void {
+export async function startUp(): Promise<void> {
   try {
     config()
   } catch (error) {
@@ -15,5 +14,6 @@ export function startUp(): void {
     process.exit(1) // the framework itself would go on and answer every request with a fault
   }
   stampAddresses()
+  const { tidy } = await import('./data/tidy') // connects, so it comes after the settings
   setInterval(() => void tidy().catch((err: unknown) => log.warn({ err }, 'tidy')), hourMs).unref()
 }
