@@ -8,13 +8,13 @@ const proofRowSchema = z.strictObject({
   id: said,
   quantity: said,
   inputs: z.record(z.string(), z.unknown()),
-  /** Name of the output that is compared. */
+  /** The output that is compared; inside lists and groups a path such as `parts/A/topEdge`. */
   output: z.string().min(1),
   /** In the unit of the output. */
   printed: z.union([z.number(), z.string().min(1), z.boolean()]),
   /** As the print writes it, where that is not the number itself: 32° 8′. */
   asPrinted: z.string().min(1).optional(),
-  /** What the print's own rounding allows. */
+  /** What the print's own rounding allows; anything wider is explained in the note. */
   tolerance: z.number().nonnegative(),
   /** A value looked up in the very table that the calculator copies proves the copying only. */
   kind: z.enum(['computed', 'looked-up']),
@@ -40,6 +40,17 @@ export interface Compared {
   agrees: boolean
 }
 
+const isRecord = (item: unknown): item is Record<string, unknown> => typeof item === 'object' && item !== null
+const isNamed = (item: unknown, key: string) => isRecord(item) && (item.id === key || item.mark === key)
+
+/** Follows a path into the outputs: a list is entered by place, or by the id or mark of an item. */
+function outputAt(outputs: unknown, path: string): unknown {
+  return path.split('/').reduce((inside: unknown, key) => {
+    if (Array.isArray(inside)) return inside.find((item: unknown) => isNamed(item, key)) ?? inside[Number(key)]
+    return isRecord(inside) ? inside[key] : undefined
+  }, outputs)
+}
+
 /**
  * Computes one published row and sets the answer beside the print.
  * @throws Error when the calculator refuses the inputs or has no such output: then the row itself is wrong.
@@ -47,7 +58,7 @@ export interface Compared {
 export async function compareRow(calculator: string, row: ProofRow): Promise<Compared> {
   const answered = await computeCalculator(calculator, row.inputs)
   if (!answered.ok) throw new Error(`${calculator} ${row.id}: ${JSON.stringify(answered.errors)}`)
-  const computed = answered.answer.outputs[row.output]
+  const computed = outputAt(answered.answer.outputs, row.output)
   if (typeof computed !== 'number' && typeof computed !== 'string' && typeof computed !== 'boolean')
     throw new Error(`${calculator} ${row.id}: there is no ${row.output}`)
   if (typeof computed !== 'number' || typeof row.printed !== 'number')

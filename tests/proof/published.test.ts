@@ -1,3 +1,4 @@
+import { readdir } from 'node:fs/promises'
 import { describe, expect, it } from 'vitest'
 import { calculatorIds, loadCalculator } from '@/lib/calculators/load'
 import { readProof } from '@/lib/proof/read'
@@ -16,7 +17,7 @@ describe.each(files.filter(({ rows }) => rows.length > 0))('$id against print', 
     const { outputs } = await loadCalculator(id)
     for (const row of rows) {
       for (const part of [row.source, row.where, row.provenance]) expect(part, row.id).not.toBe('')
-      expect(outputs).toHaveProperty(row.output)
+      expect(outputs).toHaveProperty(row.output.replace(/\/.*/, ''))
     }
     expect(new Set(rows.map((row) => row.id)).size).toBe(rows.length)
   })
@@ -25,4 +26,9 @@ describe.each(files.filter(({ rows }) => rows.length > 0))('$id against print', 
 it('holds the calculators against more than a hundred printed values', () => {
   const computed = files.flatMap(({ rows }) => rows).filter(({ kind }) => kind === 'computed')
   expect(computed.length).toBeGreaterThan(100)
+})
+
+it('stands for calculators of the handbook, each under its own name', async () => {
+  const named = (await readdir('content/proof')).map((file) => file.replace(/\.json$/, ''))
+  expect(calculatorIds).toEqual(expect.arrayContaining(named))
 })
