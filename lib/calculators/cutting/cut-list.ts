@@ -24,7 +24,7 @@ export const cutListEntry = defineCalculator({
   ],
   example: { pieces: ['169 1/2', '60', '60', '48'], stock: '240', kerf: '1/16', trim: '1/2' },
   inputs: {
-    pieces: list('Pieces, overall', inches('Piece', { above: 0, most: 12_000 }), { least: 1, most: 400 }),
+    pieces: list('Pieces, overall', inches('Piece', { above: 0, most: 12_000 }), { least: 1, most: 300 }),
     stock: inches('Stick length', { above: 0, most: 12_000, sane: [120, 480], hint: '240, 252 and 288 in are usual.' }),
     kerf: inches('Kerf', { least: 0, most: 2, sane: [0.035, 0.125] }),
     trim: inches('Trim', { least: 0, most: 240, fallback: 0, hint: 'Cut off a stick before you start.' }),

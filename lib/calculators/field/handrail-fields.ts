@@ -1,7 +1,8 @@
 import { choice, degrees, forms, group, inches, list, quantity, whole } from '../fields'
 
 const length = { above: 0, most: 12_000 }
-const railHeight = { above: 0, most: 240, sane: [34, 38] as const }
+// Unusual heights are warned of once, for the whole rail.
+const railHeight = { above: 0, most: 240 }
 const firstRise = inches('First rise', {
   ...length,
   sane: [4, 9.5],
