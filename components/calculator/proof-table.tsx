@@ -1,6 +1,7 @@
 import { defaultPrecision } from '@/lib/calculators/fields'
 import type { Output, Outputs } from '@/lib/calculators/outputs'
 import { valueText } from '@/lib/calculators/text'
+import { outputAt } from '@/lib/proof/path'
 import type { Compared } from '@/lib/proof/rows'
 
 /** Unrounded but for what doubles leave behind: a proof compares numbers, not tapes. */
@@ -30,7 +31,7 @@ export function ProofTable({ rows, outputs, title }: { rows: readonly Compared[]
           </thead>
           <tbody>
             {rows.map((compared) => (
-              <Row key={compared.row.id} {...compared} output={outputs[compared.row.output]} />
+              <Row key={compared.row.id} {...compared} output={outputAt(outputs, compared.row.output)} />
             ))}
           </tbody>
         </table>

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { computeCalculator } from '@/lib/calculators/compute'
+import { valueAt } from './path'
 
 const said = z.string().min(3)
 
@@ -40,17 +41,6 @@ export interface Compared {
   agrees: boolean
 }
 
-const isRecord = (item: unknown): item is Record<string, unknown> => typeof item === 'object' && item !== null
-const isNamed = (item: unknown, key: string) => isRecord(item) && (item.id === key || item.mark === key)
-
-/** Follows a path into the outputs: a list is entered by place, or by the id or mark of an item. */
-function outputAt(outputs: unknown, path: string): unknown {
-  return path.split('/').reduce((inside: unknown, key) => {
-    if (Array.isArray(inside)) return inside.find((item: unknown) => isNamed(item, key)) ?? inside[Number(key)]
-    return isRecord(inside) ? inside[key] : undefined
-  }, outputs)
-}
-
 /**
  * Computes one published row and sets the answer beside the print.
  * @throws Error when the calculator refuses the inputs or has no such output: then the row itself is wrong.
@@ -58,7 +48,7 @@ function outputAt(outputs: unknown, path: string): unknown {
 export async function compareRow(calculator: string, row: ProofRow): Promise<Compared> {
   const answered = await computeCalculator(calculator, row.inputs)
   if (!answered.ok) throw new Error(`${calculator} ${row.id}: ${JSON.stringify(answered.errors)}`)
-  const computed = outputAt(answered.answer.outputs, row.output)
+  const computed = valueAt(answered.answer.outputs, row.output)
   if (typeof computed !== 'number' && typeof computed !== 'string' && typeof computed !== 'boolean')
     throw new Error(`${calculator} ${row.id}: there is no ${row.output}`)
   if (typeof computed !== 'number' || typeof row.printed !== 'number')
