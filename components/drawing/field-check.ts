@@ -11,7 +11,7 @@ interface Given {
 }
 
 /** Px of the glass that the gap is looked at through. */
-const glass = 62
+const glassRadius = ({ detail }: Show) => (detail === 'full' ? 62 : 44)
 
 /** Times the gap is enlarged in the glass, so that it is neither a hair nor wider than the glass. */
 function magnification({ rise, run }: Given, gap: number): number {
@@ -32,19 +32,19 @@ export const draw: Drawing<Given, FieldCheckAnswer> = (given, solved, show) => {
       outline('object', [spot(0, 0), spot(run, 0), corner], 'face'),
       path('off', [tip, corner]),
       path('centre', [spot(0, 0), toward(spot(0, 0), given.angleFinder, rake)]),
-      ...(pitch > 1 ? [angleArc(spot(0, 0), 84, 0, pitch)] : []),
-      ...glassStrokes(given, solved),
+      ...(pitch > 1 && show.detail === 'full' ? [angleArc(spot(0, 0), 84, 0, pitch)] : []),
+      ...glassStrokes(given, solved, glassRadius(show)),
     ],
     labels: labelsOf(given, solved, show, isOff ? 'off' : 'text'),
     says: saysOf(given, solved, show),
   }
 }
 
-const glassCentre = ({ rise }: Given): Spot => spot(0, rise, glass + 6, glass + 24)
+const glassCentre = ({ rise }: Given, glass: number): Spot => spot(0, rise, glass + 6, glass + 24)
 
 /** The upper corner enlarged: where rise and run put it, and where the rake's tape ends. */
-function glassStrokes(given: Given, solved: FieldCheckAnswer): Stroke[] {
-  const centre = glassCentre(given)
+function glassStrokes(given: Given, solved: FieldCheckAnswer, glass: number): Stroke[] {
+  const centre = glassCentre(given, glass)
   const corner = spot(given.run, given.rise)
   const times = magnification(given, solved.closingError)
   const end = toward(centre, solved.pitchFromTape + 180, solved.closingError * times)
@@ -76,13 +76,14 @@ function labelsOf(given: Given, solved: FieldCheckAnswer, show: Show, ink: Label
   const corner = spot(run, rise)
   const pitch = solved.pitchFromTape
   const times = magnification(given, solved.closingError)
+  const glass = glassRadius(show)
   const drift = toward(spot(0, 0), given.angleFinder, rake)
   return [
     {
       kind: 'at',
       text: [gapText(solved, show, ink), [word(solved.verdict, ink)]],
       size: 'number',
-      spot: nudged(glassCentre(given), 0, glass),
+      spot: nudged(glassCentre(given, glass), 0, glass),
       prefer: [0, 20, 45, 90],
       gap: 12,
       required: true,
@@ -131,7 +132,7 @@ function labelsOf(given: Given, solved: FieldCheckAnswer, show: Show, ink: Label
       kind: 'at',
       text: [[word('enlarged '), word(`×${times}`, 'text')]],
       size: 'note',
-      spot: nudged(glassCentre(given), 90, glass),
+      spot: nudged(glassCentre(given, glass), 90, glass),
       prefer: [90, 60, 0],
       gap: 6,
       required: false,

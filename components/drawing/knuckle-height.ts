@@ -1,5 +1,5 @@
 import type { Drawing, LabelRequest, Show, Spot, Stroke } from '@/lib/drawing/sketch'
-import { angleArc, longPoint, path, spot } from '@/lib/drawing/strokes'
+import { angleArc, longPoint, nudged, path, spot } from '@/lib/drawing/strokes'
 import { degrees, inchesOnly, length, plain, shape, word } from '@/lib/drawing/text'
 import { tanDeg } from '@/lib/trade/angles'
 import type { KnuckleAnswer, KnuckleGiven } from '@/lib/trade/knuckle'
@@ -9,6 +9,9 @@ import { steps } from './steps'
 const assumedRun = 11
 const assumedSteps = 3
 const levelShown = 20
+
+/** Px on paper. */
+const arcRadius = ({ detail }: Show) => (detail === 'full' ? 82 : 46)
 
 interface Places {
   bottom: Spot
@@ -38,12 +41,17 @@ function placesOf(
 /** Top lines crossing, over the nosings that they are measured from. */
 export const draw: Drawing<KnuckleGiven, KnuckleAnswer> = (given, solved, show) => {
   const at = placesOf(given, solved)
-  return { strokes: strokesOf(given, at), labels: labelsOf(given, solved, show, at), says: saysOf(given, solved, show) }
+  return {
+    strokes: strokesOf(given, at, arcRadius(show)),
+    labels: labelsOf(given, solved, show, at),
+    says: saysOf(given, solved, show),
+  }
 }
 
 function strokesOf(
   { pitch, rakeHeight, firstRise }: KnuckleGiven,
   { bottom, top, topKnuckle, bottomKnuckle, lowEnd }: Places,
+  radius: number,
 ): Stroke[] {
   const floor = -(firstRise ?? assumedRun * tanDeg(pitch))
   const profile = steps({ x: 0, y: 0 }, assumedSteps + 1, assumedRun * tanDeg(pitch), assumedRun).slice(1, -1)
@@ -57,8 +65,8 @@ function strokesOf(
     path('centre', [top, spot(top.x, Math.max(top.y + rakeHeight, topKnuckle.y), 0, 26)]),
     longPoint(topKnuckle, 90),
     ...(bottomKnuckle ? [longPoint(bottomKnuckle, -90)] : []),
-    path('ext', [lowEnd, spot(lowEnd.x, lowEnd.y, 96)]),
-    angleArc(lowEnd, 82, 0, pitch),
+    path('ext', [lowEnd, spot(lowEnd.x, lowEnd.y, radius + 14)]),
+    angleArc(lowEnd, radius, 0, pitch),
   ]
 }
 
@@ -139,12 +147,7 @@ function labelsOf(given: KnuckleGiven, solved: KnuckleAnswer, show: Show, at: Pl
       kind: 'at',
       text: [degrees(pitch, 2)],
       size: 'number',
-      spot: spot(
-        at.lowEnd.x,
-        at.lowEnd.y,
-        82 * Math.cos((pitch * Math.PI) / 360),
-        82 * Math.sin((pitch * Math.PI) / 360),
-      ),
+      spot: nudged(at.lowEnd, pitch / 2, arcRadius(show)),
       prefer: [pitch / 2, 0, -30],
       gap: 8,
       required: show.detail === 'full',

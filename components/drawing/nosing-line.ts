@@ -1,5 +1,5 @@
 import type { Drawing, LabelRequest, Show } from '@/lib/drawing/sketch'
-import { angleArc, path, spot } from '@/lib/drawing/strokes'
+import { angleArc, nudged, path, spot } from '@/lib/drawing/strokes'
 import { degrees, length, number, plain, word } from '@/lib/drawing/text'
 import type { NosingLine } from '@/lib/trade/nosing-line'
 import { steps } from './steps'
@@ -19,8 +19,9 @@ export const draw: Drawing<Given, NosingLine> = (given, solved, show) => {
     strokes: [
       path('object', profile),
       path('cut', [spot(0, 0), top]),
-      path('ext', [spot(0, 0, 6), spot(0, 0, 108)]),
-      angleArc(spot(0, 0), 88, 0, solved.pitch),
+      ...(show.detail === 'full'
+        ? [path('ext', [spot(0, 0, 6), spot(0, 0, 108)]), angleArc(spot(0, 0), 88, 0, solved.pitch)]
+        : []),
     ],
     labels: labelsOf(given, solved, show),
     says: `A flight of ${risers} risers, ${plain([length(rise, show)])} by ${plain([length(run, show)])}: nosing 1 to nosing ${risers} is ${plain([length(solved.rakeNosingToNosing, show)])} along the rake in ${risers - 1} steps, ${plain([length(solved.runNosingToNosing, show)])} level, ${plain([length(solved.riseNosingToNosing, show)])} plumb. Pitch ${plain([degrees(solved.pitch, 2)])}.`,
@@ -67,15 +68,19 @@ function labelsOf({ risers, rise, run }: Given, solved: NosingLine, show: Show):
       offset: 26,
       required: full,
     },
-    {
-      kind: 'at',
-      text: [degrees(solved.pitch, 2)],
-      size: 'number',
-      required: full,
-      gap: 8,
-      spot: spot(0, 0, 88 * Math.cos((solved.pitch * Math.PI) / 360), 88 * Math.sin((solved.pitch * Math.PI) / 360)),
-      prefer: [solved.pitch / 2, 0, -45],
-    },
+    ...(full
+      ? [
+          {
+            kind: 'at',
+            text: [degrees(solved.pitch, 2)],
+            size: 'number',
+            required: true,
+            gap: 8,
+            spot: nudged(spot(0, 0), solved.pitch / 2, 88),
+            prefer: [solved.pitch / 2, 0, -45],
+          } as const,
+        ]
+      : []),
     ...nosings.map((i): LabelRequest => {
       const isEnd = i === 0 || i === risers - 1
       return {

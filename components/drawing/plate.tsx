@@ -35,7 +35,7 @@ const textScales: Readonly<Record<WidthStep, number>> = {
 }
 
 function viewportOf(step: WidthStep, shape: PlateShape): Viewport {
-  const height = shape === 'strip' ? Math.round(step * 0.42) : heights[step]
+  const height = shape === 'strip' ? Math.round(step * 0.5) : heights[step]
   return { width: step, height, textScale: textScales[step], margin: step < 480 ? 12 : 22, trim: shape === 'trim' }
 }
 

@@ -93,7 +93,9 @@ function labelsOf(
       required: true,
       gap: 6,
       spot: spot(decimalIn, 0, 0, 34),
-      prefer: [90, 60, 120],
+      prefer: [90, 45, 135],
+      reach: 10,
+      leader: false,
       text: [
         length(nearest, read, 'cut'),
         [
@@ -128,6 +130,7 @@ function labelsOf(
       spot: spot(value, 0, 0, -stripHeight - 18),
       prefer: [side, -90],
       gap: 5,
+      reach: 30,
       required: true,
     })
   }
