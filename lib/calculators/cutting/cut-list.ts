@@ -56,6 +56,11 @@ export const cutListEntry = defineCalculator({
       text: 'Use overall lengths, long point to long point along the stock, not edges.',
       beside: 'pieces',
     },
+    {
+      signal: 'notice',
+      text: 'Neighbours with parallel miters share a cut and save one setback. The sticks here are counted without that.',
+      beside: 'bars',
+    },
     { signal: 'notice', text: 'Mark each drop with its length and rack it.', beside: 'drops' },
     {
       signal: 'notice',

@@ -1,11 +1,40 @@
 import { pieceFrom } from '@/lib/trade/piece'
-import { defineCalculator } from '../define'
+import { defineCalculator, type Shown } from '../define'
 import { choice, degrees, inches } from '../fields'
 import { onTape, words } from '../outputs'
 
 const faces = ['top', 'underside', 'square'] as const
 const faceNames = ['On top', 'Underneath', 'Square'] as const
 const miter = { least: 0, most: 89, sane: [0, 45], fallback: 0, hint: 'Off square.' } as const
+
+type Reference = 'top' | 'underside' | 'centre' | 'overall'
+type Face = (typeof faces)[number]
+
+const centreSays: Record<Reference, string> = {
+  top: 'From the top edge back to the centre line: half of each setback, off or on.',
+  underside: 'From the underside back to the centre line: half of each setback, off or on.',
+  centre: 'The centre line is the known length.',
+  overall: 'The centre line is the blank less half of each setback.',
+}
+
+/** What an end adds to the top edge (side 1) or takes off it (side -1), as a term of a formula. */
+function half(end: 'A' | 'B', face: Face, side: 1 | -1): string {
+  if (face === 'square') return ''
+  return ` ${(face === 'top') === (side === 1) ? '+' : '-'} setback${end} / 2`
+}
+
+function centreFormula(ref: Reference, faceA: Face, faceB: Face): string {
+  switch (ref) {
+    case 'top':
+      return `length${half('A', faceA, -1)}${half('B', faceB, -1)}`
+    case 'underside':
+      return `length${half('A', faceA, 1)}${half('B', faceB, 1)}`
+    case 'centre':
+      return 'length'
+    case 'overall':
+      return 'length - (setbackA + setbackB) / 2'
+  }
+}
 
 /** Every length of one piece from any one of them. Inches and degrees. */
 export const longShortPoint = defineCalculator({
@@ -59,18 +88,23 @@ export const longShortPoint = defineCalculator({
   answer: 'overall',
   glance: ['overall', 'topEdge', 'underside', 'cuts'],
   solve: pieceFrom,
-  shown: {
+  shown: ({ ref, faceA, faceB }): Shown => ({
     setbackA: { says: 'Long point past short point at the low end.', formula: 'depth * tan(miterA)' },
     setbackB: { says: 'And at the high end.', formula: 'depth * tan(miterB)' },
-    overall: {
-      says: 'The blank reaches half a setback past the centre line at each end.',
-      formula: 'centre + (setbackA + setbackB) / 2',
+    centre: { says: centreSays[ref], formula: centreFormula(ref, faceA, faceB) },
+    topEdge: {
+      says: 'The top gains half a setback where the long point is on it, and loses half where it is underneath.',
+      formula: `centre${half('A', faceA, 1)}${half('B', faceB, 1)}`,
     },
     underside: {
       says: 'Top and underside lie the same amount either side of the centre line.',
       formula: '2 * centre - topEdge',
     },
-  },
+    overall: {
+      says: 'The blank reaches half a setback past the centre line at each end.',
+      formula: 'centre + (setbackA + setbackB) / 2',
+    },
+  }),
   cautions: [
     {
       signal: 'caution',

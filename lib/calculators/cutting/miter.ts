@@ -62,9 +62,14 @@ export const miter = defineCalculator({
       says: 'The bar is as deep as it is, so the long point stands this far past the short point.',
       formula: 'depth * tan(miter)',
     },
+    sawSquareIs0: { says: 'Round once, to the step of the dial.', formula: 'round(miter / dialStep) * dialStep' },
+    sawSquareIs90: { says: 'A saw that calls square 90 reads what is left of 90.', formula: '90 - sawSquareIs0' },
+    dialGap: {
+      says: 'Both cuts miss by the rounding; it opens across the joint face.',
+      formula: '2 * depth / cos(miter) * tan(abs(miter - sawSquareIs0))',
+    },
   },
-  steps: (_given, { sawSquareIs0, longPointFace }) => [
-    { says: 'Round once, to the step of the dial.', value: `${sawSquareIs0}°` },
+  steps: (_given, { longPointFace }) => [
     {
       says: 'Going up the stairs: the line turns down, long on top; it turns up, long underneath.',
       value: String(longPointFace),

@@ -1,5 +1,5 @@
 import { sawDial } from '@/lib/trade/saw-dial'
-import { defineCalculator } from '../define'
+import { defineCalculator, type Shown } from '../define'
 import { choice, degrees, readersDial } from '../fields'
 import { flag, onDial } from '../outputs'
 
@@ -28,23 +28,18 @@ export const sawDialEntry = defineCalculator({
   glance: ['squareIs0', 'squareIs90', 'overRange', 'ifOverRange'],
   solve: sawDial,
   precisionOf: ({ step }, asked) => ({ ...asked, dial: step }),
-  steps: ({ fromSquare, sawMax }, { squareIs0, squareIs90, ifOverRange }) => [
-    { says: 'Nearest mark of the dial.', value: `${squareIs0}°` },
-    {
-      says: 'A saw that calls square 90 reads what is left of 90.',
-      substituted: `90 - ${squareIs0}`,
-      value: `${squareIs90}°`,
-    },
+  shown: ({ sawMax }, { ifOverRange }): Shown => ({
+    squareIs0: { says: 'Nearest mark of the dial.', formula: 'round(fromSquare / step) * step' },
+    squareIs90: { says: 'A saw that calls square 90 reads what is left of 90.', formula: '90 - squareIs0' },
     ...(ifOverRange === null
-      ? []
-      : [
-          {
-            says: `Past the ${sawMax}° of this saw: clamp a squared block and cut the rest of 90.`,
-            substituted: `90 - ${fromSquare}`,
-            value: `${ifOverRange}°`,
+      ? {}
+      : {
+          ifOverRange: {
+            says: `Past the ${sawMax}° of this saw: clamp a squared block and cut the rest of 90, to the nearest mark.`,
+            formula: 'round((90 - fromSquare) / step) * step',
           },
-        ]),
-  ],
+        }),
+  }),
   cautions: [
     {
       signal: 'warning',

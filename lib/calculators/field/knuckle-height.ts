@@ -1,9 +1,22 @@
 import { knuckles } from '@/lib/trade/knuckle'
-import { defineCalculator, type Shown } from '../define'
+import { defineCalculator, type Note, type Shown } from '../define'
 import { degrees, inches } from '../fields'
 import { onTape } from '../outputs'
 
 const height = { above: 0, most: 240, sane: [34, 38] } as const
+
+const farOff = (pastTopNosing: number): Note[] =>
+  Math.abs(pastTopNosing) > 6
+    ? [{ field: 'topLevelHeight', message: 'The top knuckle is more than 6 in off its nosing: check the two heights.' }]
+    : []
+
+/** The bottom knuckle needs both; with one alone nothing is guessed. */
+function halfGiven(given: { bottomLevelHeight: number | null; firstRise: number | null }): Note[] {
+  if ((given.bottomLevelHeight === null) === (given.firstRise === null)) return []
+  return given.firstRise === null
+    ? [{ field: 'firstRise', message: 'The bottom knuckle needs the first rise as well.' }]
+    : [{ field: 'bottomLevelHeight', message: 'The bottom knuckle needs the height of the bottom run as well.' }]
+}
 
 /** Where the rake turns level, measured from the nosings. Degrees and inches. */
 export const knuckleHeight = defineCalculator({
@@ -33,15 +46,7 @@ export const knuckleHeight = defineCalculator({
   answer: 'pastTopNosing',
   glance: ['pastTopNosing', 'beforeBottomNosing'],
   solve: knuckles,
-  warn: (_given, { pastTopNosing }) =>
-    Math.abs(pastTopNosing) > 6
-      ? [
-          {
-            field: 'topLevelHeight',
-            message: 'The top knuckle is more than 6 in off its nosing: check the two heights.',
-          },
-        ]
-      : [],
+  warn: (given, { pastTopNosing }) => [...farOff(pastTopNosing), ...halfGiven(given)],
   shown: (_given, { beforeBottomNosing }): Shown => ({
     pastTopNosing: {
       says: 'What the level run stands higher, laid along the pitch.',

@@ -12,6 +12,7 @@ const math = create(all ?? {})
 const isUnit = (x: unknown): x is Unit => math.isUnit(x)
 const inDegrees = (radians: number) => math.unit(radians * (180 / Math.PI), 'deg')
 const toRadians = (x: Unit) => x.toNumber('rad')
+const ownUnit = (x: Unit) => (x.hasBase('LENGTH') ? 'in' : 'deg')
 
 // Trig takes an angle and nothing else: a length or a bare number in it is a fault of the formula.
 math.import(
@@ -22,8 +23,9 @@ math.import(
     asin: (x: number) => inDegrees(Math.asin(x)),
     acos: (x: number) => inDegrees(Math.acos(x)),
     atan: (x: number) => inDegrees(Math.atan(x)),
-    sign: (x: Unit | number) => (isUnit(x) ? Math.sign(x.toNumber('in')) : Math.sign(x)),
-    round: (x: Unit | number) => (isUnit(x) ? math.unit(Math.round(x.toNumber('in')), 'in') : Math.round(x)),
+    sign: (x: Unit | number) => (isUnit(x) ? Math.sign(x.toNumber(ownUnit(x))) : Math.sign(x)),
+    round: (x: Unit | number) =>
+      isUnit(x) ? math.unit(Math.round(x.toNumber(ownUnit(x))), ownUnit(x)) : Math.round(x),
   },
   { override: true },
 )
