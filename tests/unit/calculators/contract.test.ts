@@ -1,6 +1,9 @@
 import { describe, expect, it } from 'vitest'
+import { computeCalculator } from '@/lib/calculators/compute'
 import type { AnyCalculator } from '@/lib/calculators/define'
+import type { Field } from '@/lib/calculators/fields'
 import { calculatorIds, isCalculatorId, loadCalculator } from '@/lib/calculators/load'
+import type { Output } from '@/lib/calculators/outputs'
 import contract from '../../support/contract.json'
 
 interface Promised {
@@ -16,13 +19,28 @@ const promised = contract.calculators as unknown as Promised[]
 const optionalNames = ({ optional, inputs }: Promised) =>
   typeof optional === 'object' && optional !== null ? Object.keys(optional) : Object.keys(inputs)
 
-/** Outputs that solve gives for the entry's own example. */
-async function outputsOf(calculator: AnyCalculator) {
-  const { computeCalculator } = await import('@/lib/calculators/compute')
-  const computed = await computeCalculator(calculator.id, calculator.example)
+/** What the entry answers to its own example, without the inputs that are to be left out. */
+async function answerTo(calculator: AnyCalculator, without: readonly string[] = []) {
+  const given = Object.entries(calculator.example).filter(([name]) => !without.includes(name))
+  const computed = await computeCalculator(calculator.id, Object.fromEntries(given))
   if (!computed.ok) throw new Error(`${calculator.id}: its own example is refused: ${JSON.stringify(computed.errors)}`)
   return computed.answer
 }
+
+/** The unit that a line of the contract names: `in, nosing to nosing`, `4-9.5 in`, `[in] overall lengths`, `bool`. */
+function promisedUnit(line: unknown): string | undefined {
+  const named = /(?:^|[\s[])(in\/12|in|deg|mm|%|bool)(?=$|[\s,\]])/.exec(String(line))?.[1]
+  return named === 'bool' ? 'flag' : named
+}
+
+/** Units of what holds one value, or a list of such; groups and forms are spelled out by the worked examples. */
+function unitOf(field: Field | Output): string | undefined {
+  if (field.kind === 'list') return unitOf(field.of)
+  const unit = 'unit' in field ? field.unit : undefined
+  return unit === 'none' || unit === 'text' ? undefined : unit
+}
+const holdsValues = (field: Field | Output): boolean =>
+  field.kind === 'list' ? holdsValues(field.of) : !['group', 'forms', 'shape'].includes(field.kind)
 
 describe.each(promised.filter(({ id }) => isCalculatorId(id)).map((entry) => [entry.id, entry] as const))(
   '%s',
@@ -40,6 +58,28 @@ describe.each(promised.filter(({ id }) => isCalculatorId(id)).map((entry) => [en
       expect(optional.map(([name]) => name).filter((name) => !allowed.has(name))).toEqual([])
     })
 
+    it('takes and gives the units of the contract', async () => {
+      const calculator = await loadCalculator(id as (typeof calculatorIds)[number])
+      const told = [
+        ...Object.entries(calculator.inputs).map(([name, field]) => [name, field, entry.inputs[name]] as const),
+        ...Object.entries(entry.outputs).map(([name, line]) => [name, calculator.outputs[name], line] as const),
+      ]
+      // The contract leaves a line empty where there is no unit to name.
+      const compared = told.filter(([, field, line]) => field !== undefined && holdsValues(field) && line !== '')
+      expect(compared.map(([name, field]) => [name, field && unitOf(field)])).toEqual(
+        compared.map(([name, , line]) => [name, promisedUnit(line)]),
+      )
+      expect(compared.length).toBeGreaterThan(2)
+    })
+
+    it('fills in what the contract says for what is left out', async () => {
+      const calculator = await loadCalculator(id as (typeof calculatorIds)[number])
+      const { optional } = entry
+      if (typeof optional !== 'object' || optional === null) return
+      const { inputs } = await answerTo(calculator, Object.keys(optional))
+      expect(inputs).toMatchObject(optional)
+    })
+
     it('describes every output of the contract', async () => {
       const calculator = await loadCalculator(id as (typeof calculatorIds)[number])
       expect(Object.keys(calculator.outputs)).toEqual(expect.arrayContaining(Object.keys(entry.outputs)))
@@ -50,7 +90,7 @@ describe.each(promised.filter(({ id }) => isCalculatorId(id)).map((entry) => [en
 describe.each(calculatorIds)('%s', (id) => {
   it('answers its own example, and puts every number of it into words', async () => {
     const calculator = await loadCalculator(id)
-    const { outputs, text, steps } = await outputsOf(calculator)
+    const { outputs, text, steps } = await answerTo(calculator)
     for (const [name, output] of Object.entries(calculator.outputs)) {
       if (output.kind !== 'shape' && outputs[name] !== undefined) expect(Object.keys(text)).toContain(name)
     }
@@ -59,7 +99,7 @@ describe.each(calculatorIds)('%s', (id) => {
 
   it('describes exactly the outputs that solve gives', async () => {
     const calculator = await loadCalculator(id)
-    const { outputs } = await outputsOf(calculator)
+    const { outputs } = await answerTo(calculator)
     expect(Object.keys(outputs).filter((name) => !Object.hasOwn(calculator.outputs, name))).toEqual([])
   })
 
