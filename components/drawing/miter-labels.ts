@@ -36,8 +36,8 @@ export function labelsOf(given: Given, solved: MiterAnswer, show: Show, at: Plac
     ...slopeLabel(at.lowUnder, given.slopeBelow),
     ...slopeLabel(toward(at.under, given.slopeAbove, given.depth * 2), given.slopeAbove),
     ...(at.bends ? bendLabel(given, solved, at) : []),
-    ...always.slice(1),
     ...(at.bends ? setbackOf(given, solved, show, at) : []),
+    ...always.slice(1),
     {
       kind: 'dimension',
       text: [length(given.depth, show)],

