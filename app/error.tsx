@@ -13,7 +13,9 @@ export default function PageProblem({ retry }: { error: unknown; retry: () => vo
           <Button variant="primary" onClick={retry}>
             Try again
           </Button>
-          <ButtonLink href="/handbook" prefetch={false}>Open the handbook</ButtonLink>
+          <ButtonLink href="/handbook" prefetch={false}>
+            Open the handbook
+          </ButtonLink>
         </>
       }
     >

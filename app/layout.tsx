@@ -28,7 +28,8 @@ const mono = localFont({
 
 export const metadata: Metadata = {
   title: { default: 'Longpoint', template: '%s · Longpoint' },
-  description: 'Learning platform and calculator handbook for apprentice welders: measure the stair, set the saw, cut it once.',
+  description:
+    'Learning platform and calculator handbook for apprentice welders: measure the stair, set the saw, cut it once.',
 }
 
 export const viewport: Viewport = {

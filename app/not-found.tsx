@@ -11,7 +11,9 @@ export default function NotFound() {
         <ButtonLink href="/handbook" prefetch={false} variant="primary">
           Open the handbook
         </ButtonLink>
-        <ButtonLink href="/" prefetch={false}>Front page</ButtonLink>
+        <ButtonLink href="/" prefetch={false}>
+          Front page
+        </ButtonLink>
       </div>
     </article>
   )
@@ -21,7 +23,12 @@ const OffTape = () => (
   <svg viewBox="0 0 520 90" className="mb-8 block h-auto w-full max-w-[520px]" aria-hidden="true">
     <path d="M0 10h330l-14 16 14 16-14 16 14 16H0z" fill="var(--tape)" />
     {Array.from({ length: 20 }, (_, i) => (
-      <path key={i} d={`M${8 + i * 16} 10v${i % 4 === 0 ? 34 : i % 2 === 0 ? 24 : 15}`} stroke="var(--tape-ink)" strokeWidth={i % 4 === 0 ? 2.4 : 1.6} />
+      <path
+        key={i}
+        d={`M${8 + i * 16} 10v${i % 4 === 0 ? 34 : i % 2 === 0 ? 24 : 15}`}
+        stroke="var(--tape-ink)"
+        strokeWidth={i % 4 === 0 ? 2.4 : 1.6}
+      />
     ))}
     <path d="M450 82V30m-9 16 9-18 9 18z" stroke="var(--off)" fill="var(--off)" strokeWidth="2.4" />
   </svg>

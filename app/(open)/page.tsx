@@ -1,5 +1,6 @@
 import Link from 'next/link'
 import { CalculatorOnFront } from '@/components/calculator/calculator-on-front'
+import { NeedsScripts } from '@/components/calculator/needs-scripts'
 import { stages } from '@/components/calculator/stages'
 import { ButtonLink } from '@/components/ui/button'
 import { allCalculators } from '@/lib/calculators'
@@ -31,9 +32,10 @@ export default async function FrontPage() {
     <article className="calculator front">
       <h1>Measure the stair. Set the saw. Cut it once.</h1>
       <p className="lede">
-        Longpoint teaches apprentice welders to build a stair rail that fits the first time, and gives the whole shop one set of numbers, from
-        the field measure to the cut sheet.
+        Longpoint teaches apprentice welders to build a stair rail that fits the first time, and gives the whole shop
+        one set of numbers, from the field measure to the cut sheet.
       </p>
+      <NeedsScripts />
       <CalculatorOnFront id="miter" />
       <div className="front-below">
         <section aria-labelledby="handrail-way" className="hero-plate">
@@ -41,9 +43,10 @@ export default async function FrontPage() {
             The whole rail at once
           </h2>
           <p className="my-3 max-w-[56ch]">
-            Flights, landings, level runs, returns: give the stair as you measured it, and get every part with its saw setting and long point.
+            Flights, landings, level runs, returns: give the stair as you measured it, and get every part with its saw
+            setting and long point.
           </p>
-          <ButtonLink href="/handbook/handrail" prefetch={false} className="on-plate">
+          <ButtonLink href="/handbook/handrail" prefetch={false} variant="on-plate">
             Measure a stair
           </ButtonLink>
         </section>

@@ -40,7 +40,11 @@ export function CalculatorActions({ calculator, raw, answer, precision }: Calcul
   }
   return (
     <div className="actions no-print">
-      <ButtonLink href={`/jobs/save${query === '' ? '?' : `${query}&`}calculator=${id}`} prefetch={false} variant="primary">
+      <ButtonLink
+        href={`/jobs/save${query === '' ? '?' : `${query}&`}calculator=${id}`}
+        prefetch={false}
+        variant="primary"
+      >
         Save to a job
       </ButtonLink>
       <Button disabled={!answer} onClick={() => void print()}>

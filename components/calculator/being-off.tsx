@@ -8,7 +8,15 @@ import { sensitivityOf } from '@/lib/calculators/sensitivity'
 import { effectSentence } from './effect-words'
 
 /** What a small slip of each measure does to the answer. */
-export function BeingOff({ calculator, answer, precision }: { calculator: AnyCalculator; answer: Answer; precision: Precision }) {
+export function BeingOff({
+  calculator,
+  answer,
+  precision,
+}: {
+  calculator: AnyCalculator
+  answer: Answer
+  precision: Precision
+}) {
   const inputs = useDeferredValue(answer.inputs)
   const effects = useMemo(() => sensitivityOf(calculator, inputs, precision), [calculator, inputs, precision])
   if (effects.length === 0) return null

@@ -17,17 +17,20 @@ interface CalculatorFormProps {
   set: (change: RawInputs) => void
   marks: Marks
   precision: Precision
+  padDown: boolean
   /** Buttons under the inputs. */
   children?: ReactNode
 }
 
 /** The inputs of an entry, in its own order; on a phone with strip and pad. */
-export function CalculatorForm({ calculator, raw, set, marks, precision, children }: CalculatorFormProps) {
+export function CalculatorForm({ calculator, raw, set, marks, precision, padDown, children }: CalculatorFormProps) {
   const form = useRef<HTMLFormElement>(null)
   const phone = usePhone()
   const { inputs, example } = calculator
   const { main, more } = splitFields(inputs, example)
+  const [first] = main
   const pad = usePad({
+    ready: !padDown && first !== undefined && isNumber(first[1]),
     names: Object.keys(inputs).filter((name) => inputs[name] && isNumber(inputs[name])),
     textOf: (name) => textOfRaw(raw[name]),
     write: (name, text) => set({ [name]: text }),
@@ -49,13 +52,15 @@ export function CalculatorForm({ calculator, raw, set, marks, precision, childre
         </details>
       )}
       {children}
-      <PadDock
-        pad={pad}
-        field={active && isNumber(active) ? active : undefined}
-        text={pad.active === undefined ? '' : textOfRaw(raw[pad.active])}
-        precision={precision}
-        form={form}
-      />
+      {pad.open && (
+        <PadDock
+          pad={pad}
+          field={active && isNumber(active) ? active : undefined}
+          text={pad.active === undefined ? '' : textOfRaw(raw[pad.active])}
+          precision={precision}
+          form={form}
+        />
+      )}
     </form>
   )
 }

@@ -10,9 +10,13 @@ import { useBench } from './use-bench'
 export function CalculatorOnFront({ id }: { id: CalculatorId }) {
   const bench = useBench(id)
   return (
-    <Bench bench={bench}>
+    <Bench bench={bench} padDown>
       <div className="actions">
-        <ButtonLink variant="primary" prefetch={false} href={`/handbook/${id}${writeAddress(bench.calculator.inputs, bench.raw)}`}>
+        <ButtonLink
+          variant="primary"
+          prefetch={false}
+          href={`/handbook/${id}${writeAddress(bench.calculator.inputs, bench.raw)}`}
+        >
           How it works out
         </ButtonLink>
       </div>

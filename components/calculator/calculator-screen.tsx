@@ -23,7 +23,8 @@ interface CalculatorScreenProps {
 }
 
 /** True for a result that has no card of its own. */
-const isUnseen = ({ outputs, glance }: AnyCalculator, name: string) => outputs[name] !== undefined && !glance.includes(name)
+const isUnseen = ({ outputs, glance }: AnyCalculator, name: string) =>
+  outputs[name] !== undefined && !glance.includes(name)
 
 /** A calculator with all that belongs to its numbers. */
 export function CalculatorScreen({ id, typeset, related, children }: CalculatorScreenProps) {
@@ -44,7 +45,12 @@ export function CalculatorScreen({ id, typeset, related, children }: CalculatorS
           {answer && (
             <details className="more">
               <summary>Every number</summary>
-              <EveryNumber outputs={calculator.outputs} solved={answer.outputs} precision={precision} units={preferences.units} />
+              <EveryNumber
+                outputs={calculator.outputs}
+                solved={answer.outputs}
+                precision={precision}
+                units={preferences.units}
+              />
             </details>
           )}
           {answer && <BeingOff calculator={calculator} answer={answer} precision={precision} />}

@@ -9,7 +9,9 @@ const unseen = 0.0005
 /** One slip and what it does, in words: “1/16 in in the run moves the answer 0.02°.” */
 export function effectSentence({ label, unit, change }: Effect, calculator: AnyCalculator): string {
   const said = `${slips[unit]} in “${label}”`
-  return change < unseen ? `${said} does not move the answer.` : `${said} moves the answer ${amount(change, unitOfAnswer(calculator))}.`
+  return change < unseen
+    ? `${said} does not move the answer.`
+    : `${said} moves the answer ${amount(change, unitOfAnswer(calculator))}.`
 }
 
 function unitOfAnswer({ outputs, answer, exactAnswer }: AnyCalculator): string {

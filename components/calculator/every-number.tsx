@@ -38,7 +38,8 @@ interface ShownProps {
 function Shown({ output, value, precision, units }: ShownProps) {
   if (value === null || output.kind === 'shape') return <>none</>
   if (output.kind === 'value') return <Reading output={output} value={value} precision={precision} units={units} />
-  if (output.kind === 'group') return <EveryNumber outputs={output.of} solved={value as Values} precision={precision} units={units} />
+  if (output.kind === 'group')
+    return <EveryNumber outputs={output.of} solved={value as Values} precision={precision} units={units} />
   const items = Array.isArray(value) ? (value as unknown[]) : []
   if (items.length === 0) return <>none</>
   if (output.of.kind === 'group') return <Rows of={output.of} items={items} precision={precision} units={units} />
@@ -55,7 +56,17 @@ function Shown({ output, value, precision, units }: ShownProps) {
 }
 
 /** A list of alike sets: a row each. */
-function Rows({ of, items, precision, units }: { of: OutputGroup; items: readonly unknown[]; precision: Precision; units: 'in' | 'mm' }) {
+function Rows({
+  of,
+  items,
+  precision,
+  units,
+}: {
+  of: OutputGroup
+  items: readonly unknown[]
+  precision: Precision
+  units: 'in' | 'mm'
+}) {
   const columns = Object.entries(of.of).filter(([, column]) => column.kind !== 'shape')
   return (
     <div className="table-scroll" tabIndex={0} role="region" aria-label={of.label}>

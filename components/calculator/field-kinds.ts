@@ -20,7 +20,9 @@ export function fallbackText(field: Field, precision: Precision): string | undef
 }
 
 /** The options of a choice with the names a person reads. */
-export const optionsOf = ({ options, names }: ChoiceField) => options.map((option, i) => ({ value: String(option), name: names?.[i] ?? String(option) }))
+export const optionsOf = ({ options, names }: ChoiceField) =>
+  options.map((option, i) => ({ value: String(option), name: names?.[i] ?? String(option) }))
 
 /** Typed text of one input; anything else than text or number is none. */
-export const textOfRaw = (value: unknown): string => (typeof value === 'string' || typeof value === 'number' ? String(value) : '')
+export const textOfRaw = (value: unknown): string =>
+  typeof value === 'string' || typeof value === 'number' ? String(value) : ''

@@ -14,7 +14,8 @@ const isOf = (name: string, field: string | undefined) =>
   field === name || field?.startsWith(`${name}.`) === true || field?.startsWith(`${name}[`) === true
 
 /** The sentence for a wrong input, or nothing. */
-export const faultOf = (marks: Marks, name: string): string | undefined => marks.faults.find(({ field }) => isOf(name, field))?.message
+export const faultOf = (marks: Marks, name: string): string | undefined =>
+  marks.faults.find(({ field }) => isOf(name, field))?.message
 
 /** Notes and cautions of one input, to stand under it. */
 export function FieldMarks({ marks, name }: { marks: Marks; name: string }): ReactNode {

@@ -7,7 +7,13 @@ export interface Listed {
   alsoCalled: readonly string[]
 }
 
-const words = (text: string): string[] => text.toLowerCase().normalize('NFKD').replace(/[^a-z0-9/ ]+/g, ' ').split(/\s+/).filter(Boolean)
+const words = (text: string): string[] =>
+  text
+    .toLowerCase()
+    .normalize('NFKD')
+    .replace(/[^a-z0-9/ ]+/g, ' ')
+    .split(/\s+/)
+    .filter(Boolean)
 
 /** Letters that may be wrong in a word of this length and still mean it. */
 const forgiven = (length: number) => (length < 4 ? 0 : length < 8 ? 1 : 2)
@@ -27,7 +33,8 @@ export function slipsBetween(a: string, b: string): number {
     const next = [i]
     for (let j = 1; j <= b.length; j++) {
       const change = (row[j - 1] ?? 0) + (a[i - 1] === b[j - 1] ? 0 : 1)
-      const swap = i > 1 && j > 1 && a[i - 1] === b[j - 2] && a[i - 2] === b[j - 1] ? (before[j - 2] ?? 0) + 1 : Infinity
+      const swap =
+        i > 1 && j > 1 && a[i - 1] === b[j - 2] && a[i - 2] === b[j - 1] ? (before[j - 2] ?? 0) + 1 : Infinity
       next.push(Math.min((row[j] ?? 0) + 1, (next[j - 1] ?? 0) + 1, change, swap))
     }
     before = row
@@ -40,10 +47,14 @@ export function slipsBetween(a: string, b: string): number {
 function rank(query: readonly string[], { name, alsoCalled, asks }: Listed): number | undefined {
   const texts = [words(name), alsoCalled.flatMap(words), words(asks)]
   const places = query.map((typed) => {
-    const found = texts.flatMap((known, place) => known.flatMap((word) => distance(typed, word) ?? []).map((slip) => place + slip * 2.5))
+    const found = texts.flatMap((known, place) =>
+      known.flatMap((word) => distance(typed, word) ?? []).map((slip) => place + slip * 2.5),
+    )
     return found.length === 0 ? undefined : Math.min(...found)
   })
-  return places.every((place) => place !== undefined) ? places.reduce<number>((sum, place) => sum + (place ?? 0), 0) : undefined
+  return places.every((place) => place !== undefined)
+    ? places.reduce<number>((sum, place) => sum + (place ?? 0), 0)
+    : undefined
 }
 
 /** The calculators that every word of the query fits, the nearest first; all of them for an empty query. */

@@ -56,10 +56,18 @@ export function FractionStrip({ den, part, onPick, label }: FractionStripProps) 
       }}
       onPointerMove={(event) => event.buttons > 0 && pick(event)}
     >
-      {at !== null && <rect className="strip-mark" x={margin + (at / den) * across - 11} y={0} width={22} height={height} />}
+      {at !== null && (
+        <rect className="strip-mark" x={margin + (at / den) * across - 11} y={0} width={22} height={height} />
+      )}
       {ticksOf(den).map(({ place, length, name, strong }) => (
         <g key={place}>
-          <line x1={margin + place * across} x2={margin + place * across} y1={0} y2={length} strokeWidth={strong ? 2.4 : 1.6} />
+          <line
+            x1={margin + place * across}
+            x2={margin + place * across}
+            y1={0}
+            y2={length}
+            strokeWidth={strong ? 2.4 : 1.6}
+          />
           {name && (
             <text x={margin + place * across} y={height - 6}>
               {name}

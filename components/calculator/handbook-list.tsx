@@ -41,7 +41,8 @@ export function HandbookList({ calculators, stages }: HandbookListProps) {
 }
 
 function Found({ found }: { found: readonly Listed[] }) {
-  if (found.length > 0) return <Group title={found.length === 1 ? 'One fits' : `${found.length} fit`} calculators={found} />
+  if (found.length > 0)
+    return <Group title={found.length === 1 ? 'One fits' : `${found.length} fit`} calculators={found} />
   return (
     <p role="status" className="my-8 max-w-[62ch]">
       Nothing in the handbook goes by that name. Try one word of what the hand does: cut, slope, height, stick.

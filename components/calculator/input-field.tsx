@@ -59,6 +59,15 @@ export function InputField({ name, field, raw, set, marks, pad, phone, precision
       />
     )
   }
-  if (field.kind === 'list') return <ListEditor name={name} field={field} value={raw[name]} onChange={(items) => set({ [name]: items })} faults={marks.faults} />
+  if (field.kind === 'list')
+    return (
+      <ListEditor
+        name={name}
+        field={field}
+        value={raw[name]}
+        onChange={(items) => set({ [name]: items })}
+        faults={marks.faults}
+      />
+    )
   return null
 }

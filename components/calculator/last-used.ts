@@ -29,4 +29,9 @@ export function useLastUsed(id: string): void {
   }, [id])
 }
 
-export const useLastUsedIds = (): readonly string[] => useSyncExternalStore(() => () => undefined, () => (kept ??= read()), () => nothing)
+export const useLastUsedIds = (): readonly string[] =>
+  useSyncExternalStore(
+    () => () => undefined,
+    () => (kept ??= read()),
+    () => nothing,
+  )

@@ -52,7 +52,8 @@ export function ListEditor({ name, field, value, onChange, faults }: ListEditorP
           </p>
         ))}
         <p className="field-hint">
-          {items.length} in all. One a line; <span className="font-mono">3 × 74 1/2</span> for three alike. Paste as many as you have.
+          {items.length} in all. One a line; <span className="font-mono">3 × 74 1/2</span> for three alike. Paste as
+          many as you have.
         </p>
       </div>
     </div>

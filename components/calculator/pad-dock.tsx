@@ -33,7 +33,9 @@ function partOf(text: string, field: NumberField | undefined): number | null {
 }
 
 function boxes(form: HTMLElement | null): HTMLInputElement[] {
-  return [...(form?.querySelectorAll<HTMLInputElement>('input[data-pad]') ?? [])].filter((box) => box.offsetParent !== null)
+  return [...(form?.querySelectorAll<HTMLInputElement>('input[data-pad]') ?? [])].filter(
+    (box) => box.offsetParent !== null,
+  )
 }
 
 /** Strip and pad at the foot of a phone. */

@@ -60,7 +60,12 @@ export function setFraction(text: string, divisions: number, den: number): strin
   const typed = readTyped(text)
   const shared = commonDivisor(divisions, den)
   const whole = typed.whole.split('.')[0] ?? ''
-  return writeTyped({ ...typed, whole: divisions === 0 && whole === '' && typed.feet === '' ? '0' : whole, numerator: divisions / shared, denominator: den / shared })
+  return writeTyped({
+    ...typed,
+    whole: divisions === 0 && whole === '' && typed.feet === '' ? '0' : whole,
+    numerator: divisions / shared,
+    denominator: den / shared,
+  })
 }
 
 const commonDivisor = (a: number, b: number): number => (b === 0 ? a || 1 : commonDivisor(b, a % b))

@@ -4,7 +4,16 @@ import type { PointerEvent, ReactNode } from 'react'
 import type { PadKey } from './pad-text'
 
 const BackSign = () => (
-  <svg width="30" height="20" viewBox="0 0 30 20" aria-hidden="true" fill="none" stroke="currentColor" strokeWidth="2.4" className="inline">
+  <svg
+    width="30"
+    height="20"
+    viewBox="0 0 30 20"
+    aria-hidden="true"
+    fill="none"
+    stroke="currentColor"
+    strokeWidth="2.4"
+    className="inline"
+  >
     <path d="M9 2h19v16H9L2 10zM14 6l8 8m0-8-8 8" />
   </svg>
 )
@@ -41,11 +50,24 @@ export function Pad({ onKey, onNext, onKeyboard }: PadProps) {
   return (
     <div className="pad" role="group" aria-label="Number pad">
       {rows.map(({ key, name, says }) => (
-        <button key={key} type="button" className="pad-key" aria-label={says} onPointerDown={keepFocus} onClick={() => onKey(key)}>
+        <button
+          key={key}
+          type="button"
+          className="pad-key"
+          aria-label={says}
+          onPointerDown={keepFocus}
+          onClick={() => onKey(key)}
+        >
           {name}
         </button>
       ))}
-      <button type="button" className="pad-key pad-word" onPointerDown={keepFocus} onClick={onKeyboard} aria-label="Write with the keyboard">
+      <button
+        type="button"
+        className="pad-key pad-word"
+        onPointerDown={keepFocus}
+        onClick={onKeyboard}
+        aria-label="Write with the keyboard"
+      >
         abc
       </button>
       <button type="button" className="pad-key pad-next" onPointerDown={keepFocus} onClick={onNext}>

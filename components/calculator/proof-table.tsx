@@ -50,7 +50,11 @@ function Row({ row, computed, difference, agrees, output }: Compared & { output:
       <td>{row.asPrinted ?? plainText(row.printed, output)}</td>
       <td>{plainText(computed, output)}</td>
       <td>
-        {difference === null ? (agrees ? 'the same' : 'another') : `${difference > 0 ? '+' : ''}${plainText(difference, output)}`}
+        {difference === null
+          ? agrees
+            ? 'the same'
+            : 'another'
+          : `${difference > 0 ? '+' : ''}${plainText(difference, output)}`}
         {!agrees && <b className="block text-off">{row.printIsWrong ?? 'outside its rounding'}</b>}
       </td>
     </tr>

@@ -33,7 +33,9 @@ function countText(rows: readonly Compared[]): string {
   const copied = rows.length - computed.length
   const agreement = agreeing === computed.length ? 'all agree' : `${agreeing} agree`
   const told = `${computed.length} published values that it computes: ${agreement} within what their print rounds to.`
-  return copied === 0 ? told : `${told} ${copied} more are looked up in a table that it copies, and prove the copying only.`
+  return copied === 0
+    ? told
+    : `${told} ${copied} more are looked up in a table that it copies, and prove the copying only.`
 }
 
 function byPrint(rows: readonly Compared[]): [string, Compared[]][] {

@@ -22,7 +22,19 @@ interface QuantityRowProps {
 }
 
 /** One measure to type: stacked on a desk, a row on a phone. */
-export function QuantityRow({ id, name, field, value, onChange, active, onActive, keyboard, placeholder, fault, below }: QuantityRowProps) {
+export function QuantityRow({
+  id,
+  name,
+  field,
+  value,
+  onChange,
+  active,
+  onActive,
+  keyboard,
+  placeholder,
+  fault,
+  below,
+}: QuantityRowProps) {
   return (
     <div className="quantity-row" data-active={active || undefined}>
       <TextField

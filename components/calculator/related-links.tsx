@@ -6,7 +6,15 @@ import type { RawInputs } from './address'
 import { relatedHref, type Related } from './related'
 
 /** Where people go on to; numbers that both share go along. */
-export function RelatedLinks({ related, fields, raw }: { related: readonly Related[]; fields: Fields; raw: RawInputs }) {
+export function RelatedLinks({
+  related,
+  fields,
+  raw,
+}: {
+  related: readonly Related[]
+  fields: Fields
+  raw: RawInputs
+}) {
   if (related.length === 0) return null
   return (
     <section aria-labelledby="related" className="no-print">

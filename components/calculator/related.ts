@@ -21,6 +21,8 @@ export function sharedInputs(from: Fields, to: Fields): string[] {
 
 /** Its address, with the numbers it shares filled in. */
 export function relatedHref({ id, shares }: Related, fields: Fields, raw: RawInputs): string {
-  const carried = Object.fromEntries(shares.filter((name) => raw[name] !== undefined && raw[name] !== '').map((name) => [name, raw[name]]))
+  const carried = Object.fromEntries(
+    shares.filter((name) => raw[name] !== undefined && raw[name] !== '').map((name) => [name, raw[name]]),
+  )
   return `/handbook/${id}${writeAddress(fields, carried)}`
 }

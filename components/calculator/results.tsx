@@ -45,8 +45,13 @@ export function Results({ calculator, answer, stale, precision, preferences, cau
 }
 
 /** The exact decimal, and the entry's own sentence under the number. */
-function noteOf(calculator: AnyCalculator, { outputs }: Answer, { name, output, value }: ShownOutput, precision: Precision): string {
-  const exactName = name === calculator.answer ? calculator.exactAnswer : undefined
+function noteOf(
+  calculator: AnyCalculator,
+  { outputs }: Answer,
+  { name, output, value }: ShownOutput,
+  precision: Precision,
+): string {
+  const exactName = name === calculator.answer && typeof value === 'number' ? calculator.exactAnswer : undefined
   const twin = exactName === undefined ? undefined : calculator.outputs[exactName]
   if (exactName !== undefined && twin?.kind === 'value') {
     return join(`exactly ${valueText(twin, outputs[exactName], precision)}`, output.hint)

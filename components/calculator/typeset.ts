@@ -2,14 +2,17 @@ import katex from 'katex'
 import { create, parseDependencies, type MathNode } from 'mathjs/number'
 import type { AnyCalculator } from '@/lib/calculators/define'
 
-/** A formula's name in TeX: the entry's own symbol, or the name upright. */
+/** A formula's name in TeX: the entry's own symbol, or the name in words. */
 const symbolsOf = ({ inputs, outputs }: Pick<AnyCalculator, 'inputs' | 'outputs'>) => {
   const symbols = new Map<string, string>()
   for (const [name, field] of [...Object.entries(inputs), ...Object.entries(outputs)]) {
     if ('symbol' in field && typeof field.symbol === 'string') symbols.set(name, field.symbol)
   }
-  return (name: string) => symbols.get(name) ?? `\\mathrm{${name.replace(/_/g, '\\_')}}`
+  return (name: string) => symbols.get(name) ?? `\text{${wordsOf(name)}}`
 }
+
+/** `sawSquareIs0` as a person reads it: saw square is 0. */
+const wordsOf = (name: string) => name.replace(/([a-z])([A-Z0-9])/g, '$1 $2').toLowerCase()
 
 const { parse } = create(parseDependencies ?? {})
 

@@ -16,7 +16,8 @@ const searchNow = () => (ahead?.path === location.pathname ? ahead.search : loca
 
 function settle(): void {
   clearTimeout(timer)
-  if (ahead?.path === location.pathname) history.replaceState(history.state, '', `${ahead.path}${ahead.search}${location.hash}`)
+  if (ahead?.path === location.pathname)
+    history.replaceState(history.state, '', `${ahead.path}${ahead.search}${location.hash}`)
   ahead = null
 }
 

@@ -11,7 +11,8 @@ import { useAnswerAside } from './use-answer-aside'
 /** Past so many pieces a search may take long enough to be felt. */
 const longList = 20
 
-export const isLong = (raw: RawInputs) => Object.values(raw).some((value) => Array.isArray(value) && value.length > longList)
+export const isLong = (raw: RawInputs) =>
+  Object.values(raw).some((value) => Array.isArray(value) && value.length > longList)
 
 export interface Standing {
   /** The answer to show: of these inputs, or while they cannot be read, the last one that could. */

@@ -36,7 +36,13 @@ export function useBench(id: CalculatorId): BenchState {
   const asked = useMemo(() => precisionOf(preferences), [preferences])
   const stand = useAnswer(calculator, raw, asked)
   const { answer } = stand
-  const precision = useMemo(() => (answer && calculator.precisionOf?.(answer.inputs, asked)) ?? asked, [answer, calculator, asked])
-  const cautions = useMemo(() => (answer ? standing(calculator, answer.inputs, answer.outputs) : none), [answer, calculator])
+  const precision = useMemo(
+    () => (answer && calculator.precisionOf?.(answer.inputs, asked)) ?? asked,
+    [answer, calculator, asked],
+  )
+  const cautions = useMemo(
+    () => (answer ? standing(calculator, answer.inputs, answer.outputs) : none),
+    [answer, calculator],
+  )
   return { ...stand, calculator, draw, raw, set, preferences, asked, precision, cautions }
 }

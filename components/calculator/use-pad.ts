@@ -6,6 +6,8 @@ import { pressKey, setFraction, type PadKey } from './pad-text'
 export interface PadState {
   /** Name of the row that the pad writes into. */
   active: string | undefined
+  /** False until a row is chosen where the first input is no number. */
+  open: boolean
   /** The reader asked for the device's own keyboard. */
   keyboard: boolean
   activate: (name: string) => void
@@ -15,13 +17,15 @@ export interface PadState {
 }
 
 interface PadRows {
+  /** The pad stands ready before a row is chosen. */
+  ready: boolean
   names: readonly string[]
   textOf: (name: string) => string
   write: (name: string, text: string) => void
 }
 
 /** Which row the pad writes into, and what its keys do there. The first key in a freshly chosen row starts over. */
-export function usePad({ names, textOf, write }: PadRows): PadState {
+export function usePad({ ready, names, textOf, write }: PadRows): PadState {
   const [chosen, setChosen] = useState<string | undefined>(undefined)
   const [fresh, setFresh] = useState(true)
   const [keyboard, setKeyboard] = useState(false)
@@ -33,6 +37,7 @@ export function usePad({ names, textOf, write }: PadRows): PadState {
   }
   return {
     active,
+    open: ready || chosen !== undefined,
     keyboard,
     activate: (name) => {
       setFresh(name !== active || chosen === undefined)

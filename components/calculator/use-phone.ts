@@ -11,4 +11,9 @@ function subscribe(listener: () => void): () => void {
 }
 
 /** True on a screen narrow enough for the pad. Pages rendered ahead take it for a desk. */
-export const usePhone = (): boolean => useSyncExternalStore(subscribe, () => window.matchMedia(query).matches, () => false)
+export const usePhone = (): boolean =>
+  useSyncExternalStore(
+    subscribe,
+    () => window.matchMedia(query).matches,
+    () => false,
+  )

@@ -44,15 +44,25 @@ export function Working({ calculator, steps, stale, typeset }: WorkingProps) {
   )
 }
 
-/** Our own formula, set by our own typesetter: nothing a reader typed but numbers reaches it. */
+/** Our own formula, set by our own typesetter: nothing a reader typed but numbers reaches it. A long one scrolls, by key too. */
 const Formula = ({ text, html }: { text: string; html: string | undefined }) =>
-  html === undefined ? <p className="formula font-mono">{text}</p> : <p className="formula" dangerouslySetInnerHTML={{ __html: html }} />
+  html === undefined ? (
+    <p className="formula font-mono">{text}</p>
+  ) : (
+    <p className="formula" tabIndex={0} dangerouslySetInnerHTML={{ __html: html }} />
+  )
 
 function Numbers({ step, html }: { step: Step; html: string | undefined }) {
-  if (step.substituted === undefined) return <p className="substituted">{step.value}</p>
+  if (step.substituted === undefined)
+    return (
+      <p className="substituted">
+        <b>{step.value}</b>
+      </p>
+    )
   return (
     <p className="substituted">
-      {html === undefined ? `= ${step.substituted}` : <span dangerouslySetInnerHTML={{ __html: `= ${html}` }} />} = <b>{step.value}</b>
+      {html === undefined ? `= ${step.substituted}` : <span dangerouslySetInnerHTML={{ __html: `= ${html}` }} />} ={' '}
+      <b>{step.value}</b>
     </p>
   )
 }

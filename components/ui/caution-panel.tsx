@@ -3,15 +3,32 @@ import { signalColours, type SignalWord } from './caution-word'
 import { classNames } from './class-names'
 
 /** Signal panel in the manner of ANSI Z535: the word, its colour, the sentence. A notice has no alert sign. */
-export function CautionPanel({ signal, children, className }: { signal: SignalWord; children: ReactNode; className?: string }) {
+export function CautionPanel({
+  signal,
+  children,
+  className,
+}: {
+  signal: SignalWord
+  children: ReactNode
+  className?: string
+}) {
   return (
-    <aside aria-label={signal} className={classNames('caution rounded-[3px] border-2 border-ink bg-field', className)}>
-      <p className={classNames('flex items-center gap-2 border-b-2 border-ink px-3.5 py-1 font-head text-xl font-semibold tracking-[.06em]', signalColours[signal])}>
+    <div
+      role="note"
+      aria-label={signal}
+      className={classNames('caution rounded-[3px] border-2 border-ink bg-field', className)}
+    >
+      <p
+        className={classNames(
+          'flex items-center gap-2 border-b-2 border-ink px-3.5 py-1 font-head text-xl font-semibold tracking-[.06em]',
+          signalColours[signal],
+        )}
+      >
         {signal !== 'notice' && <AlertSign />}
         {signal.toUpperCase()}
       </p>
       <div className="px-3.5 pt-2 pb-3 text-base">{children}</div>
-    </aside>
+    </div>
   )
 }
 

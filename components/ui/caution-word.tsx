@@ -10,5 +10,7 @@ export const signalColours: Record<SignalWord, string> = {
 
 /** The signal word alone, small, before a sentence beside a number. */
 export const CautionWord = ({ signal }: { signal: SignalWord }) => (
-  <b className={`rounded-[2px] px-1.5 font-head text-[15px] font-semibold tracking-[.05em] ${signalColours[signal]}`}>{signal.toUpperCase()}</b>
+  <b className={`rounded-[2px] px-1.5 font-head text-[15px] font-semibold tracking-[.05em] ${signalColours[signal]}`}>
+    {signal.toUpperCase()}
+  </b>
 )

@@ -10,7 +10,14 @@ export interface ChoiceFieldProps<T extends string | number> {
 }
 
 /** A row of native radios that looks like one control. */
-export function ChoiceField<T extends string | number>({ label, options, value, onChange, hint, fault }: ChoiceFieldProps<T>) {
+export function ChoiceField<T extends string | number>({
+  label,
+  options,
+  value,
+  onChange,
+  hint,
+  fault,
+}: ChoiceFieldProps<T>) {
   const id = useId()
   return (
     <fieldset className="field choice" aria-describedby={fault ? `${id}-fault` : undefined}>
@@ -18,7 +25,13 @@ export function ChoiceField<T extends string | number>({ label, options, value, 
       <div className="choice-row">
         {options.map((option) => (
           <label key={option.value} className="choice-option">
-            <input type="radio" name={id} value={option.value} checked={option.value === value} onChange={() => onChange(option.value)} />
+            <input
+              type="radio"
+              name={id}
+              value={option.value}
+              checked={option.value === value}
+              onChange={() => onChange(option.value)}
+            />
             <span>{option.name}</span>
           </label>
         ))}

@@ -34,7 +34,12 @@ function subscribe(listener: () => void): () => void {
 }
 
 /** Who is signed in, asked once a visit by open pages, which know no cookie. */
-export const useMe = (): Me | null | undefined => useSyncExternalStore(subscribe, () => me, () => undefined)
+export const useMe = (): Me | null | undefined =>
+  useSyncExternalStore(
+    subscribe,
+    () => me,
+    () => undefined,
+  )
 
 /** Asks again, after signing in or out. */
 export const refreshMe = ask

@@ -3,5 +3,7 @@ import { classNames } from './class-names'
 
 /** A sheet of card on the paper. */
 export function Panel({ className, ...rest }: ComponentProps<'section'>) {
-  return <section className={classNames('rounded-plate border border-rule bg-card p-6 max-sm:p-4', className)} {...rest} />
+  return (
+    <section className={classNames('rounded-plate border border-rule bg-card p-6 max-sm:p-4', className)} {...rest} />
+  )
 }

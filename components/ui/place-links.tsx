@@ -8,7 +8,13 @@ import { placeOf, places } from './places'
 export function PlaceLinks({ className }: { className: string }) {
   const open = placeOf(usePathname())
   return places.map(({ href, name }) => (
-    <Link key={href} href={href} prefetch={false} className={className} aria-current={href === open ? 'page' : undefined}>
+    <Link
+      key={href}
+      href={href}
+      prefetch={false}
+      className={className}
+      aria-current={href === open ? 'page' : undefined}
+    >
       {name}
     </Link>
   ))

@@ -19,8 +19,15 @@ let kept: Preferences | undefined
 /** Preferences out of stored text; a wrong or missing one falls back to the usual. */
 export function readPreferences(text: string | null): Preferences {
   const found = parse(text)
-  const pick = <K extends keyof Preferences>(name: K): Preferences[K] => choices[name].find((value) => value === found[name]) ?? usual[name]
-  return { units: pick('units'), tape: pick('tape'), sawSquare: pick('sawSquare'), dialStep: pick('dialStep'), theme: pick('theme') }
+  const pick = <K extends keyof Preferences>(name: K): Preferences[K] =>
+    choices[name].find((value) => value === found[name]) ?? usual[name]
+  return {
+    units: pick('units'),
+    tape: pick('tape'),
+    sawSquare: pick('sawSquare'),
+    dialStep: pick('dialStep'),
+    theme: pick('theme'),
+  }
 }
 
 function parse(text: string | null): Record<string, unknown> {

@@ -49,10 +49,30 @@ export function PreferencesFields() {
   const set = (wanted: Partial<Preferences>) => change(wanted, signedIn)
   return (
     <>
-      <ChoiceField label="Lengths shown in" options={units} value={now.units} onChange={(value) => set({ units: value })} />
-      <ChoiceField label="Finest mark on your tape" options={tapes} value={now.tape} onChange={(tape) => set({ tape })} />
-      <ChoiceField label="Your saw says" options={squares} value={now.sawSquare} onChange={(sawSquare) => set({ sawSquare })} />
-      <ChoiceField label="Finest step of the dial" options={dials} value={now.dialStep} onChange={(dialStep) => set({ dialStep })} />
+      <ChoiceField
+        label="Lengths shown in"
+        options={units}
+        value={now.units}
+        onChange={(value) => set({ units: value })}
+      />
+      <ChoiceField
+        label="Finest mark on your tape"
+        options={tapes}
+        value={now.tape}
+        onChange={(tape) => set({ tape })}
+      />
+      <ChoiceField
+        label="Your saw says"
+        options={squares}
+        value={now.sawSquare}
+        onChange={(sawSquare) => set({ sawSquare })}
+      />
+      <ChoiceField
+        label="Finest step of the dial"
+        options={dials}
+        value={now.dialStep}
+        onChange={(dialStep) => set({ dialStep })}
+      />
       <ChoiceField label="Screen" options={themes} value={now.theme} onChange={(theme) => set({ theme })} />
     </>
   )
@@ -64,7 +84,12 @@ export function PreferencesButton() {
   const { units: unit, tape } = usePreferences()
   return (
     <>
-      <button type="button" className="nav-link cursor-pointer" onClick={() => dialog.current?.showModal()} aria-haspopup="dialog">
+      <button
+        type="button"
+        className="nav-link cursor-pointer"
+        onClick={() => dialog.current?.showModal()}
+        aria-haspopup="dialog"
+      >
         <span className="sr-only">Tape, saw and screen. Lengths in </span>
         {unit === 'in' ? `in · 1/${tape}` : 'mm'}
       </button>

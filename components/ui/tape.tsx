@@ -47,7 +47,7 @@ function TapeGlyphs({ inches, den }: { inches: number; den: number }) {
   return (
     <span aria-hidden="true" className="whitespace-nowrap">
       {parts.negative && '−'}
-      {parts.feet > 0 && <>{parts.feet}′&nbsp;</>}
+      {parts.feet > 0 && <span className="feet">{parts.feet}′</span>}
       {!bare && parts.inches}
       {parts.numerator > 0 && <Fraction numerator={parts.numerator} denominator={parts.denominator} />}″
     </span>

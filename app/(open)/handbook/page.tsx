@@ -7,7 +7,8 @@ import { allCalculators } from '@/lib/calculators'
 
 export const metadata: Metadata = {
   title: 'Handbook',
-  description: 'Calculators for the stair rail, from the field measure to the cut sheet, each with its drawing and its working.',
+  description:
+    'Calculators for the stair rail, from the field measure to the cut sheet, each with its drawing and its working.',
 }
 
 export default async function HandbookPage() {
@@ -17,12 +18,14 @@ export default async function HandbookPage() {
   return (
     <>
       <h1>Handbook</h1>
-      <p className="lede">One question, one page: the number, a drawing of it to scale, how it works out, and what to mind.</p>
+      <p className="lede">
+        One question, one page: the number, a drawing of it to scale, how it works out, and what to mind.
+      </p>
       {handrail && (
         <section className="hero-plate mb-9">
           <h2 className="text-[38px]">{handrail.name}</h2>
           <p className="my-3 max-w-[56ch]">{handrail.lede}</p>
-          <ButtonLink href="/handbook/handrail" prefetch={false} className="on-plate">
+          <ButtonLink href="/handbook/handrail" prefetch={false} variant="on-plate">
             Measure the stair
           </ButtonLink>
         </section>

@@ -4,6 +4,7 @@ import { notFound } from 'next/navigation'
 import { CalculatorScreen } from '@/components/calculator/calculator-screen'
 import { Proof } from '@/components/calculator/proof'
 import { sharedInputs, type Related } from '@/components/calculator/related'
+import { NeedsScripts } from '@/components/calculator/needs-scripts'
 import { Sources } from '@/components/calculator/sources'
 import { stageName } from '@/components/calculator/stages'
 import { typesetAhead } from '@/components/calculator/typeset-ahead'
@@ -47,10 +48,14 @@ export default async function CalculatorPage({ params }: Props) {
   return (
     <article className="calculator">
       <p className="crumb">
-        <Link href="/handbook" prefetch={false}>Handbook</Link> · {stageName(calculator.stage)}
+        <Link href="/handbook" prefetch={false}>
+          Handbook
+        </Link>{' '}
+        · {stageName(calculator.stage)}
       </p>
       <h1>{calculator.name}</h1>
       <p className="lede">{calculator.lede}</p>
+      <NeedsScripts />
       <CalculatorScreen id={id} typeset={typesetAhead(calculator)} related={await relatedOf(calculator)}>
         <Sources sources={calculator.sources} basis={calculator.basis} />
         <Proof rows={proof} outputs={calculator.outputs} />

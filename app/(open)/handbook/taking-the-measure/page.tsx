@@ -9,7 +9,10 @@ export default function TakingTheMeasurePage() {
   return (
     <article className="note">
       <p className="crumb">
-        <Link href="/handbook" prefetch={false}>Handbook</Link> · To read first
+        <Link href="/handbook" prefetch={false}>
+          Handbook
+        </Link>{' '}
+        · To read first
       </p>
       <h1>{frontmatter.title}</h1>
       <p className="lede">{frontmatter.lede}</p>
