@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { drawingIds, loadDrawing } from '@/components/drawing/load'
+import { viewportFor } from '@/components/drawing/plate-viewport'
 import { compose, type Viewport } from '@/lib/drawing/compose'
 import { layText } from '@/lib/drawing/measure'
 import type { Plate } from '@/lib/drawing/plate'
@@ -8,10 +9,11 @@ import type { Drawing, Show, Sketch } from '@/lib/drawing/sketch'
 import { casesOf } from './cases'
 import { offPaper, overlaps, said } from './overlaps'
 
-/** As a phone, a desk and a printed sheet compose it. */
+/** As a phone's strip, a phone's plate, a desk and a printed sheet compose it. */
 const sheets: { viewport: Viewport; detail: Show['detail'] }[] = [
-  { viewport: { width: 340, height: 310, textScale: 0.76, margin: 12 }, detail: 'compact' },
-  { viewport: { width: 760, height: 590, margin: 22 }, detail: 'full' },
+  { viewport: viewportFor(340, 'strip'), detail: 'compact' },
+  { viewport: viewportFor(340, 'plate'), detail: 'compact' },
+  { viewport: viewportFor(760, 'plate'), detail: 'full' },
   { viewport: { width: 700, height: 400, textScale: 0.75, lineScale: 0.7, margin: 8 }, detail: 'full' },
 ]
 
@@ -57,7 +59,7 @@ describe.each([...drawingIds])('%s', (id) => {
   const { extremes, any, solve } = casesOf[id] ?? { extremes: [], any: fc.constant({}), solve: () => null }
 
   it.each(sheets)(
-    'keeps every label clear at the ends of its range, $viewport.width px',
+    'keeps every label clear at the ends of its range, $viewport.width × $viewport.height px',
     async ({ viewport, detail }) => {
       const draw = await drawingOf(id)
       for (const given of extremes) {
