@@ -30,7 +30,7 @@ export const draw: Drawing<Given, FieldCheckAnswer> = (given, solved, show) => {
   return {
     strokes: [
       outline('object', [spot(0, 0), spot(run, 0), corner], 'face'),
-      path('off', [tip, corner]),
+      path(gapInk(solved), [tip, corner]),
       path('centre', [spot(0, 0), toward(spot(0, 0), given.angleFinder, rake)]),
       ...(pitch > 1 && show.detail === 'full' ? [angleArc(spot(0, 0), 84, 0, pitch)] : []),
       ...glassStrokes(given, solved, glassRadius(show)),
@@ -39,6 +39,9 @@ export const draw: Drawing<Given, FieldCheckAnswer> = (given, solved, show) => {
     says: saysOf(given, solved, show),
   }
 }
+
+/** Red is for what is out of tolerance; a gap within it is only shown. */
+const gapInk = ({ verdict }: FieldCheckAnswer) => (verdict === 'measure again' ? 'off' : 'cut')
 
 const glassCentre = ({ rise }: Given, glass: number): Spot => spot(0, rise, glass + 6, glass + 24)
 
@@ -56,7 +59,7 @@ function glassStrokes(given: Given, solved: FieldCheckAnswer, glass: number): St
     angleArc(corner, 10, 0, 360),
     path('object', [nudged(centre, -90, glass - 4), centre]),
     path('object', [nudged(centre, solved.pitchFromTape + 180, glass - 4), isShort ? end : centre]),
-    ...(Math.abs(solved.closingError) > 1e-4 ? [path('off', [centre, end])] : []),
+    ...(Math.abs(solved.closingError) > 1e-4 ? [path(gapInk(solved), [centre, end])] : []),
   ]
 }
 
@@ -81,7 +84,10 @@ function labelsOf(given: Given, solved: FieldCheckAnswer, show: Show, ink: Label
   return [
     {
       kind: 'at',
-      text: [gapText(solved, show, ink), [word(solved.verdict, ink)]],
+      text: [
+        gapText(solved, show, ink),
+        [word(solved.verdict === 'agree' ? 'tapes and finder agree' : solved.verdict, ink)],
+      ],
       size: 'number',
       spot: nudged(glassCentre(given, glass), 0, glass),
       prefer: [0, 20, 45, 90],
