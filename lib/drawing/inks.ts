@@ -1,4 +1,4 @@
-import type { Ink, LabelSize } from './sketch'
+import type { Ink, LabelSize } from './kinds'
 
 /** Line widths in px at full size; a hand in a glove at arm's length sees 2.4. */
 export const inkWidths: Readonly<Record<Ink, number>> = {

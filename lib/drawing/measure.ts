@@ -1,7 +1,7 @@
 import { fractionShare, textSizes, wordShare } from './inks'
 import metrics from './metrics.json'
 import type { PlacedRun } from './plate'
-import type { LabelSize } from './sketch'
+import type { LabelSize } from './kinds'
 import type { Line, RichText, Run } from './text'
 
 /** A label laid out: its runs in place, and the room it takes. Px. */

@@ -1,5 +1,5 @@
 import type { Box, Point } from './boxes'
-import type { Fill, Ink, LabelInk } from './sketch'
+import type { Fill, Ink, LabelInk, Shape } from './kinds'
 
 /** One line or outline on paper: px, y down. */
 export interface Mark {
@@ -12,8 +12,6 @@ export interface Mark {
   part?: string
   passable?: boolean
 }
-
-export type Shape = 'arrow' | 'arrow-left' | 'triangle-down' | 'triangle-up'
 
 /** A piece of a label, at its place inside it: px from the label's own left end and first baseline, y down. */
 export type PlacedRun = { x: number; y: number; size: number; width: number; ink: LabelInk } & (

@@ -1,4 +1,7 @@
+import type { Fill, Ink, LabelSize, Show } from './kinds'
 import type { RichText } from './text'
+
+export type { Fill, Ink, LabelInk, Show } from './kinds'
 
 /** A place in the model, inches with y up, moved by so much on paper (px, y up) whatever the scale. */
 export interface Spot {
@@ -7,11 +10,6 @@ export interface Spot {
   dx?: number
   dy?: number
 }
-
-/** What a line stands for; its width and colour follow. */
-export type Ink = 'object' | 'dim' | 'ext' | 'ghost' | 'post' | 'cut' | 'off' | 'centre' | 'hatch' | 'flag' | 'tape'
-export type Fill = 'face' | 'solid' | 'off-face' | 'tape' | 'shade' | 'ground'
-export type LabelInk = 'text' | 'quiet' | 'cut' | 'off' | 'on-tape'
 
 interface Belongs {
   /** The part it belongs to: pointing at that part anywhere lights it here. */
@@ -46,7 +44,6 @@ interface Asked {
   otherwise?: LabelRequest
   part?: string
 }
-export type LabelSize = 'answer' | 'number' | 'note'
 interface Words extends Asked {
   text: RichText
   size: LabelSize
@@ -96,14 +93,6 @@ export interface Sketch {
   labels: readonly LabelRequest[]
   /** The drawing in words, with its numbers. */
   says: string
-}
-
-/** How the reader's tape and dial read, and how much to show. */
-export interface Show {
-  tape: 8 | 16 | 32 | 64
-  dial: 0.25 | 0.5 | 1
-  metric?: boolean
-  detail: 'full' | 'compact'
 }
 
 /** A pure function of what was given and what was solved. */

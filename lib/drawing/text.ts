@@ -1,8 +1,7 @@
 import { dialParts } from '@/lib/trade/quantity/dial'
 import { tapeParts } from '@/lib/trade/quantity/tape'
 import { showMetric } from '@/lib/trade/quantity/metric'
-import type { Shape } from './plate'
-import type { LabelInk, Show } from './sketch'
+import type { LabelInk, Shape, Show } from './kinds'
 
 /** A piece of a label. Numbers are set in the mono face, words in the heading face, fractions as fractions. */
 export type Run = { ink?: LabelInk } & (
