@@ -61,8 +61,13 @@ export const jobParams = z.object({ id: idField })
 /** Place of a sheet in the address: its number in the job, from 1. */
 export const sheetParams = z.object({ id: idField, sheet: z.coerce.number().int().min(1).max(9999) })
 
+const revisionNumber = z.coerce.number().int().min(1).max(9999)
+
 /** Which revision is read; left out, the current one. */
-export const revisionQuery = z.object({ revision: z.coerce.number().int().min(1).max(9999).optional() })
+export const revisionQuery = z.object({ revision: revisionNumber.optional() })
+
+/** Which two revisions stand beside each other. */
+export const comparedRevisions = z.object({ was: revisionNumber, is: revisionNumber })
 
 /** Where the next page of a list begins, as the page before gave it, and whether put-away jobs are listed. */
 export const jobsQuery = z.object({
