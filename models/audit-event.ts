@@ -6,8 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize'
-import { idColumn, instantColumn } from './columns'
-import { uuidv7 } from './uuid'
+import { idColumn, idKey, instantColumn } from './columns'
 
 /** Who did what to which row, and when. Added to, never changed. */
 export class AuditEvent extends Model<InferAttributes<AuditEvent>, InferCreationAttributes<AuditEvent>> {
@@ -24,7 +23,7 @@ export class AuditEvent extends Model<InferAttributes<AuditEvent>, InferCreation
 export function defineAuditEvent(sequelize: Sequelize) {
   AuditEvent.init(
     {
-      id: { type: idColumn, primaryKey: true, defaultValue: () => uuidv7() },
+      id: idKey(),
       shopId: idColumn,
       actorId: idColumn,
       action: DataTypes.STRING(60),

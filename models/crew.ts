@@ -6,8 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize'
-import { idColumn, instantColumn } from './columns'
-import { uuidv7 } from './uuid'
+import { idColumn, idKey, instantColumn } from './columns'
 
 /** Instructors and their apprentices. */
 export class Crew extends Model<InferAttributes<Crew>, InferCreationAttributes<Crew>> {
@@ -21,7 +20,7 @@ export class Crew extends Model<InferAttributes<Crew>, InferCreationAttributes<C
 export function defineCrew(sequelize: Sequelize) {
   Crew.init(
     {
-      id: { type: idColumn, primaryKey: true, defaultValue: () => uuidv7() },
+      id: idKey(),
       shopId: idColumn,
       name: DataTypes.STRING(80),
       createdAt: instantColumn,

@@ -7,8 +7,7 @@ import {
   type Sequelize,
 } from 'sequelize'
 import type { SheetAnswer } from '@/lib/schemas/views'
-import { idColumn, instantColumn } from './columns'
-import { uuidv7 } from './uuid'
+import { idColumn, idKey, instantColumn } from './columns'
 
 /** One revision of one cut sheet. Rows are added, never rewritten: an older one is only marked superseded. */
 export class CutSheet extends Model<InferAttributes<CutSheet>, InferCreationAttributes<CutSheet>> {
@@ -35,7 +34,7 @@ export class CutSheet extends Model<InferAttributes<CutSheet>, InferCreationAttr
 export function defineCutSheet(sequelize: Sequelize) {
   CutSheet.init(
     {
-      id: { type: idColumn, primaryKey: true, defaultValue: () => uuidv7() },
+      id: idKey(),
       jobId: idColumn,
       sheet: DataTypes.INTEGER,
       revision: DataTypes.INTEGER,

@@ -6,8 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize'
-import { idColumn, instantColumn } from './columns'
-import { uuidv7 } from './uuid'
+import { idColumn, idKey, instantColumn } from './columns'
 
 /** One job in a journeyman's book. */
 export class Job extends Model<InferAttributes<Job>, InferCreationAttributes<Job>> {
@@ -29,7 +28,7 @@ export class Job extends Model<InferAttributes<Job>, InferCreationAttributes<Job
 export function defineJob(sequelize: Sequelize) {
   Job.init(
     {
-      id: { type: idColumn, primaryKey: true, defaultValue: () => uuidv7() },
+      id: idKey(),
       shopId: idColumn,
       ownerId: idColumn,
       name: DataTypes.STRING(120),

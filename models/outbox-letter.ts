@@ -6,8 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize'
-import { idColumn, instantColumn } from './columns'
-import { uuidv7 } from './uuid'
+import { idKey, instantColumn } from './columns'
 
 /** A letter to be mailed, written in the transaction that causes it, so that neither is lost without the other. */
 export class OutboxLetter extends Model<InferAttributes<OutboxLetter>, InferCreationAttributes<OutboxLetter>> {
@@ -27,7 +26,7 @@ export class OutboxLetter extends Model<InferAttributes<OutboxLetter>, InferCrea
 export function defineOutboxLetter(sequelize: Sequelize) {
   OutboxLetter.init(
     {
-      id: { type: idColumn, primaryKey: true, defaultValue: () => uuidv7() },
+      id: idKey(),
       kind: DataTypes.STRING(40),
       recipient: DataTypes.STRING(254),
       payload: DataTypes.JSON,

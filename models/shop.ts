@@ -6,8 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize'
-import { idColumn, instantColumn } from './columns'
-import { uuidv7 } from './uuid'
+import { idKey, instantColumn } from './columns'
 
 /** A school, a local, an employer: the wall nothing crosses. */
 export class Shop extends Model<InferAttributes<Shop>, InferCreationAttributes<Shop>> {
@@ -20,7 +19,7 @@ export class Shop extends Model<InferAttributes<Shop>, InferCreationAttributes<S
 export function defineShop(sequelize: Sequelize) {
   Shop.init(
     {
-      id: { type: idColumn, primaryKey: true, defaultValue: () => uuidv7() },
+      id: idKey(),
       name: DataTypes.STRING(80),
       createdAt: instantColumn,
       updatedAt: instantColumn,

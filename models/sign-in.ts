@@ -6,8 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize'
-import { idColumn, instantColumn } from './columns'
-import { uuidv7 } from './uuid'
+import { idColumn, idKey, instantColumn } from './columns'
 
 /** One session on one device. Ended rows stay, so that the list can show them go. */
 export class SignIn extends Model<InferAttributes<SignIn>, InferCreationAttributes<SignIn>> {
@@ -23,7 +22,7 @@ export class SignIn extends Model<InferAttributes<SignIn>, InferCreationAttribut
 export function defineSignIn(sequelize: Sequelize) {
   SignIn.init(
     {
-      id: { type: idColumn, primaryKey: true, defaultValue: () => uuidv7() },
+      id: idKey(),
       userId: idColumn,
       startedAt: instantColumn,
       lastSeenAt: instantColumn,

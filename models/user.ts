@@ -7,8 +7,7 @@ import {
   type Sequelize,
 } from 'sequelize'
 import type { Preferences, Role } from '@/lib/schemas/account'
-import { idColumn, instantColumn } from './columns'
-import { uuidv7 } from './uuid'
+import { idColumn, idKey, instantColumn } from './columns'
 
 /** A person who signs in. */
 export class User extends Model<InferAttributes<User>, InferCreationAttributes<User>> {
@@ -34,7 +33,7 @@ export class User extends Model<InferAttributes<User>, InferCreationAttributes<U
 export function defineUser(sequelize: Sequelize) {
   User.init(
     {
-      id: { type: idColumn, primaryKey: true, defaultValue: () => uuidv7() },
+      id: idKey(),
       shopId: idColumn,
       name: DataTypes.STRING(80),
       email: DataTypes.STRING(254),

@@ -8,6 +8,7 @@ import { passwordFault } from '@/lib/schemas/password'
 import type { Account } from '@/lib/schemas/views'
 import { Shop, SignIn, User } from '@/models'
 import { record } from './audit'
+import { post } from './outbox'
 import { inTransaction } from './transaction'
 
 /** The actor's own account, and where it is signed in. */
@@ -50,7 +51,7 @@ export async function savePreferences(actor: Actor, change: Partial<Preferences>
 }
 
 /**
- * Changes the password and signs out everywhere else.
+ * Changes the password, signs out everywhere else, and writes to the owner that it happened.
  * @throws Unfit when the present one does not fit or the new one is guessed early.
  * @throws Conflict when it was changed in between.
  */
@@ -73,6 +74,7 @@ export async function changePassword(actor: Actor, { currentPassword, password }
     if (changed === 0) throw new Conflict('The account was changed elsewhere in between. Sign in again.')
     await endOthers(actor, transaction)
     await record({ ...subject(actor), action: 'password.changed' }, transaction)
+    await post({ kind: 'password-changed', recipient: user.email, payload: { name: actor.name } }, transaction)
   })
 }
 

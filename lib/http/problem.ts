@@ -29,11 +29,7 @@ const titles: { [status: number]: string } = {
 }
 
 /** One answer in the form of RFC 9457. */
-export function problem(
-  status: number,
-  more: Partial<Problem> & { current?: number } = {},
-  headers: HeadersInit = {},
-): Response {
+export function problem(status: number, more: Partial<Problem> = {}, headers: HeadersInit = {}): Response {
   const body = { type: 'about:blank', title: titles[status] ?? 'Refused', status, ...more }
   return Response.json(body, {
     status,

@@ -4,7 +4,7 @@ import type { Problem } from '@/lib/schemas/views'
 export class ProblemError extends Error {
   override name = 'ProblemError'
   constructor(
-    readonly problem: Problem & { current?: number },
+    readonly problem: Problem,
     readonly retryAfterSeconds?: number,
   ) {
     super(problem.detail ?? problem.errors?.[0]?.message ?? problem.title)

@@ -1,14 +1,9 @@
 import type { AnyCalculator } from '@/lib/calculators/define'
 import { askSchema, descriptionOf, inputsSchema, outputsSchema } from './calculator'
+import { bare, json, refusals } from './openapi-parts'
+import { shopPaths } from './openapi-shop'
+import { problemSchema } from './views'
 import { z } from './zod'
-
-const problemSchema = z.object({
-  type: z.string(),
-  title: z.string(),
-  status: z.number().int(),
-  detail: z.string().optional(),
-  errors: z.array(z.object({ field: z.string(), message: z.string() })).optional(),
-})
 
 const stepSchema = z.object({
   says: z.string(),
@@ -19,27 +14,6 @@ const stepSchema = z.object({
 
 const noteSchema = z.object({ field: z.string().optional(), message: z.string() })
 const sourceSchema = z.object({ says: z.string(), where: z.string() })
-
-const json = (schema: z.ZodType, io: 'input' | 'output' = 'output') => ({
-  'application/json': { schema: bare(schema, io) },
-})
-
-/** Inside an OpenAPI document the dialect is said once, at the top. */
-function bare(schema: z.ZodType, io: 'input' | 'output') {
-  const { $schema: _, ...rest } = z.toJSONSchema(schema, { io })
-  return rest
-}
-
-const problem = (description: string) => ({
-  description,
-  content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
-})
-
-const refusals = {
-  '400': problem('The body is not JSON.'),
-  '413': problem('The body is over 64 KB.'),
-  '422': problem('One message for each wrong field, saying what would be accepted.'),
-}
 
 function answerSchema(calculator: AnyCalculator) {
   return z.object({
@@ -93,15 +67,15 @@ function pathsOf(calculator: AnyCalculator) {
   }
 }
 
-/** The OpenAPI 3.1 description of what is open to everybody, made from the very schemas and fields that are served. */
+/** The OpenAPI 3.1 description of the whole API, made from the very schemas and fields that are served. */
 export function openapi(calculators: readonly AnyCalculator[]) {
   return {
     openapi: '3.1.0',
     info: {
-      title: 'Longpoint calculators',
+      title: 'Longpoint',
       version: '1',
       description:
-        'Shop calculators for stair rail work. Lengths in inches and angles in degrees unless a unit says otherwise. The adopted local code and a licensed professional decide.',
+        'Shop calculators for stair rail work, open to everybody, and the job book of those who sign in. Lengths in inches and angles in degrees unless a unit says otherwise. The adopted local code and a licensed professional decide.',
       license: { name: 'MIT', identifier: 'MIT' },
     },
     servers: [{ url: '/' }],
@@ -116,8 +90,12 @@ export function openapi(calculators: readonly AnyCalculator[]) {
         },
       },
       ...Object.assign({}, ...calculators.map(pathsOf)),
+      ...shopPaths,
     },
-    components: { schemas: { Problem: bare(problemSchema, 'output') } },
+    components: {
+      schemas: { Problem: bare(problemSchema, 'output') },
+      securitySchemes: { session: { type: 'apiKey', in: 'cookie', name: 'longpoint.session' } },
+    },
   }
 }
 

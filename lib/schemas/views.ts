@@ -1,26 +1,32 @@
-import type { Preferences, Role } from './account'
+import { preferencesSchema, roles } from './account'
+import { z } from './zod'
 
-/** What a screen is given: plain, dates as ISO text in UTC. Made by `lib/data`, sent by the API alike. */
-export interface Me {
-  name: string
-  role: Role
-  preferences: Preferences
-}
+/** What screens are given and the API sends: plain, with instants as ISO text in UTC. Made by `lib/data`. */
+const instant = z.iso.datetime()
+const day = z.iso.date()
+const named = z.record(z.string(), z.unknown())
 
-export interface Account extends Me {
-  email: string
-  shop: string
-  signIns: { id: string; startedAt: string; lastSeenAt: string; agent: string; thisOne: boolean }[]
-}
+export const meSchema = z.object({ name: z.string(), role: z.enum(roles), preferences: preferencesSchema })
+export type Me = z.output<typeof meSchema>
 
-export interface JobLine {
-  id: string
-  name: string
-  place: string
-  client: string
-  sheets: number
-  updatedAt: string
-}
+export const accountSchema = meSchema.extend({
+  email: z.string(),
+  shop: z.string(),
+  signIns: z.array(
+    z.object({ id: z.uuid(), startedAt: instant, lastSeenAt: instant, agent: z.string(), thisOne: z.boolean() }),
+  ),
+})
+export type Account = z.output<typeof accountSchema>
+
+const jobHead = { id: z.uuid(), name: z.string(), place: z.string(), client: z.string(), updatedAt: instant }
+
+const jobLineSchema = z.object({ ...jobHead, sheets: z.int().describe('How many cut sheets it has') })
+export type JobLine = z.output<typeof jobLineSchema>
+
+export const jobsPageSchema = z.object({
+  lines: z.array(jobLineSchema),
+  next: z.string().nullable().describe('The cursor of the page after, or null'),
+})
 
 /** One page of a list; `next` is the cursor of the page after, or null. */
 export interface Page<Line> {
@@ -28,80 +34,78 @@ export interface Page<Line> {
   next: string | null
 }
 
-export interface SheetLine {
-  sheet: number
-  name: string
-  calculator: string
-  /** Current revision. */
-  revision: number
-  measuredBy: string
-  measuredOn: string
-  createdAt: string
-}
+const sheetLineSchema = z.object({
+  sheet: z.int(),
+  name: z.string(),
+  calculator: z.string(),
+  revision: z.int().describe('The current one'),
+  measuredBy: z.string(),
+  measuredOn: day,
+  createdAt: instant,
+})
+export type SheetLine = z.output<typeof sheetLineSchema>
 
-export interface JobView {
-  id: string
-  name: string
-  place: string
-  client: string
-  notes: string
-  version: number
-  archivedAt: string | null
-  updatedAt: string
-  /** May this reader change it? */
-  writable: boolean
-  sheets: SheetLine[]
-}
+export const jobViewSchema = z.object({
+  ...jobHead,
+  notes: z.string(),
+  version: z.int(),
+  archivedAt: instant.nullable(),
+  writable: z.boolean().describe('May this reader change it?'),
+  sheets: z.array(sheetLineSchema),
+})
+export type JobView = z.output<typeof jobViewSchema>
 
-export interface RevisionLine {
-  revision: number
-  note: string
-  measuredBy: string
-  measuredOn: string
-  createdBy: string
-  createdAt: string
-  supersededAt: string | null
-}
+export const revisionLineSchema = z.object({
+  revision: z.int(),
+  note: z.string().describe('What changed'),
+  measuredBy: z.string(),
+  measuredOn: day,
+  createdBy: z.string(),
+  createdAt: instant,
+  supersededAt: instant.nullable(),
+})
+export type RevisionLine = z.output<typeof revisionLineSchema>
 
-export interface SheetView extends RevisionLine {
-  jobId: string
-  jobName: string
-  place: string
-  client: string
-  sheet: number
-  name: string
-  calculator: string
-  calculatorRevision: number
-  instrument: string
-  /** As understood, in the contract's units. */
-  inputs: { [name: string]: unknown }
-  /** The calculator's whole answer of the day it was saved: `outputs`, `text`, `steps`, `warnings`, `sources`. */
-  results: SheetAnswer
-  /** Number of the current revision; equal to `revision` unless this one is superseded. */
-  currentRevision: number
-  /** May this reader revise it? */
-  writable: boolean
-}
+const sheetAnswerSchema = z.object({
+  id: z.string(),
+  revision: z.int(),
+  inputs: named,
+  outputs: named,
+  text: named,
+  steps: z.array(z.unknown()),
+  warnings: z.array(z.unknown()),
+  sources: z.array(z.unknown()).readonly(),
+})
+export type SheetAnswer = z.output<typeof sheetAnswerSchema>
 
-export interface SheetAnswer {
-  id: string
-  revision: number
-  inputs: { [name: string]: unknown }
-  outputs: { [name: string]: unknown }
-  text: { [name: string]: unknown }
-  steps: unknown[]
-  warnings: unknown[]
-  sources: readonly unknown[]
-}
+export const sheetViewSchema = revisionLineSchema.extend({
+  jobId: z.uuid(),
+  jobName: z.string(),
+  place: z.string(),
+  client: z.string(),
+  sheet: z.int(),
+  name: z.string(),
+  calculator: z.string(),
+  calculatorRevision: z.int(),
+  instrument: z.string(),
+  inputs: named.describe('As understood, in inches and degrees'),
+  results: sheetAnswerSchema.describe('The calculator’s whole answer of the day it was saved'),
+  currentRevision: z.int().describe('Equal to `revision` unless this one is superseded'),
+  writable: z.boolean().describe('May this reader revise it?'),
+})
+export type SheetView = z.output<typeof sheetViewSchema>
 
 /** RFC 9457, as every refusal of the API is sent (`application/problem+json`). */
-export interface Problem {
-  type: string
-  title: string
-  status: number
-  detail?: string
-  /** One a wrong field. */
-  errors?: { field: string; message: string }[]
-  /** Under this number the log has more. */
-  id?: string
-}
+export const problemSchema = z.object({
+  type: z.string(),
+  title: z.string(),
+  status: z.int(),
+  detail: z.string().optional(),
+  errors: z
+    .array(z.object({ field: z.string(), message: z.string() }))
+    .optional()
+    .describe('One a wrong field'),
+  id: z.string().optional().describe('Under this number the log has more'),
+  current: z.int().optional().describe('The version that stands, after a conflict'),
+})
+export type Problem = z.output<typeof problemSchema>

@@ -8,7 +8,7 @@ import { POST as start } from '@/app/api/start/route'
 import { Actor } from '@/lib/auth/actor'
 import { openSignIn } from '@/lib/data/sign-ins'
 import type { Account, Me } from '@/lib/schemas/views'
-import { AuditEvent, User } from '@/models'
+import { AuditEvent, OutboxLetter, User } from '@/models'
 import { BrowserSession } from '@/tests/support/browser-session'
 import { call, problemIn, read } from '@/tests/support/call'
 import { newPerson, password } from '@/tests/support/people'
@@ -101,6 +101,8 @@ describe('a changed password', () => {
     expect(await Actor.of(elsewhere, person.id)).toBeNull()
     expect(await Actor.of(person.signIn, person.id)).not.toBeNull()
     expect(await AuditEvent.count({ where: { subjectId: person.id, action: 'password.changed' } })).toBe(1)
+    const letters = await OutboxLetter.findAll({ where: { recipient: person.email }, raw: true })
+    expect(letters).toMatchObject([{ kind: 'password-changed', attempts: 0, sentAt: null }])
   })
 
   it('needs the present one, which cannot be guessed at for long', async () => {

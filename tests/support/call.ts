@@ -42,7 +42,7 @@ export async function read<Answer>(response: Response): Promise<Answer> {
 }
 
 /** What a refusal says, after a look at its form. Throws when it is no problem+json. */
-export async function problemIn(response: Response): Promise<Problem & { current?: number }> {
+export async function problemIn(response: Response): Promise<Problem> {
   const type = response.headers.get('content-type')
   const problem = await read<Problem>(response)
   const sound = type === 'application/problem+json' && problem.status === response.status && problem.title !== ''
