@@ -1,18 +1,13 @@
-import { valueText } from '@/lib/calculators/text'
 import type { Precision } from '@/lib/calculators/fields'
-import type { Change, Leaf } from './compare'
-
-function text(leaf: Leaf | undefined, precision: Precision): string {
-  if (!leaf) return '–'
-  if (leaf.shown) return valueText(leaf.shown, leaf.value, precision)
-  return typeof leaf.value === 'number' ? String(Number(leaf.value.toFixed(4))) : String(leaf.value)
-}
+import { readsAs, type Change, type Leaf } from './compare'
 
 function difference({ before, after }: Change): string {
   if (typeof before?.value !== 'number' || typeof after?.value !== 'number') return ''
   const by = after.value - before.value
   return `${by > 0 ? '+' : '−'}${Math.abs(by).toFixed(3)}`
 }
+
+const text = (leaf: Leaf | undefined, precision: Precision) => (leaf ? readsAs(leaf, precision) : '–')
 
 /** What two revisions say differently, old beside new. */
 export function ChangeTable({
@@ -26,8 +21,8 @@ export function ChangeTable({
 }) {
   if (changes.length === 0) return <p>Nothing differs.</p>
   return (
-    <div className="table-scroll" tabIndex={0} role="region" aria-label={caption}>
-      <table className="change-table">
+    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label={caption}>
+      <table className="w-full max-w-[60rem] border-collapse text-left [&_td]:font-mono [&_td,&_th]:border-b [&_td,&_th]:border-rule [&_td,&_th]:px-2 [&_td,&_th]:py-2 [&_td]:whitespace-nowrap [&_tbody_th]:font-normal">
         <caption className="sr-only">{caption}</caption>
         <thead>
           <tr>

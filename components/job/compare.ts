@@ -1,5 +1,6 @@
-import type { Field, Fields } from '@/lib/calculators/fields'
+import type { Field, Fields, Precision } from '@/lib/calculators/fields'
 import type { Output, Outputs, OutputValue } from '@/lib/calculators/outputs'
+import { valueText } from '@/lib/calculators/text'
 
 type Plain = number | string | boolean
 
@@ -25,7 +26,11 @@ const asRecord = (value: unknown): Record<string, unknown> =>
   typeof value === 'object' && value !== null ? (value as Record<string, unknown>) : {}
 const joined = (label: string, of: string) =>
   label === '' ? of : `${label}, ${of.charAt(0).toLowerCase()}${of.slice(1)}`
-const numbered = (label: string, i: number) => `${label.replace(/s$/, '')} ${i + 1}`
+/** A thing of a list goes by its mark where it has one: Part B, Bracket 2. */
+function named(label: string, item: unknown, i: number): string {
+  const { mark } = asRecord(item)
+  return `${label.replace(/s$/, '')} ${typeof mark === 'string' ? mark : i + 1}`
+}
 
 /** Every given value of a sheet. */
 export function inputLeaves(fields: Fields, inputs: unknown, label = '', path = ''): Leaf[] {
@@ -40,7 +45,7 @@ function fieldLeaves(field: Field, value: unknown, label: string, path: string):
   switch (field.kind) {
     case 'list':
       return Array.isArray(value)
-        ? value.flatMap((item: unknown, i) => fieldLeaves(field.of, item, numbered(label, i), `${path}[${i}]`))
+        ? value.flatMap((item: unknown, i) => fieldLeaves(field.of, item, named(label, item, i), `${path}[${i}]`))
         : []
     case 'group':
       return inputLeaves(field.fields, value, label, path)
@@ -68,29 +73,27 @@ function solvedLeaves(output: Output, value: unknown, label: string, path: strin
   if (value === null || value === undefined) return []
   if (Array.isArray(value)) {
     const of = output.kind === 'list' ? output.of : output
-    return value.flatMap((item: unknown, i) => solvedLeaves(of, item, numbered(label, i), `${path}[${i}]`))
+    return value.flatMap((item: unknown, i) => solvedLeaves(of, item, named(label, item, i), `${path}[${i}]`))
   }
   if (output.kind === 'group') return outputLeaves(output.of, value, label, path)
   return output.kind === 'value' && isPlain(value) ? [{ path, label, value, shown: output }] : []
 }
 
-/** Below this two numbers are one: nobody cuts to it. */
-const same = 1e-6
+/** A value as it stands on the sheet: rounded to tape and dial where it is read there. */
+export function readsAs({ value, shown }: Leaf, precision: Precision): string {
+  if (shown) return valueText(shown, value, precision)
+  return typeof value === 'number' ? String(Number(value.toFixed(4))) : String(value)
+}
 
-/** What stands differently in the two, in the order of the older one, new ones last. */
-export function changesOf(before: readonly Leaf[], after: readonly Leaf[]): Change[] {
+/** What reads differently in the two, in the order of the older one, new ones last. */
+export function changesOf(before: readonly Leaf[], after: readonly Leaf[], precision: Precision): Change[] {
   const later = new Map(after.map((leaf) => [leaf.path, leaf]))
   const earlier = new Set(before.map(({ path }) => path))
+  const reads = (leaf: Leaf | undefined) => leaf && readsAs(leaf, precision)
   return [
     ...before.map((leaf) => ({ path: leaf.path, label: leaf.label, before: leaf, after: later.get(leaf.path) })),
     ...after
       .filter(({ path }) => !earlier.has(path))
       .map((leaf) => ({ path: leaf.path, label: leaf.label, before: undefined, after: leaf })),
-  ].filter(differs)
-}
-
-function differs({ before, after }: Change): boolean {
-  if (typeof before?.value === 'number' && typeof after?.value === 'number')
-    return Math.abs(before.value - after.value) > same
-  return before?.value !== after?.value
+  ].filter((change) => reads(change.before) !== reads(change.after))
 }

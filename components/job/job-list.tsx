@@ -69,7 +69,11 @@ export function JobList({ writable }: { writable: boolean }) {
 function JobRow({ line: { id, name, place, client, sheets, updatedAt } }: { line: JobLine }) {
   return (
     <li>
-      <Link href={`/jobs/${id}`} prefetch={false} className="job-row">
+      <Link
+        href={`/jobs/${id}`}
+        prefetch={false}
+        className="grid gap-1 rounded-plate border border-rule bg-card p-5 text-ink no-underline hover:border-ink max-sm:p-4"
+      >
         <b className="font-head text-[22px]">{name}</b>
         <span className="text-mute">{[place, client].filter(Boolean).join(' · ')}</span>
         <span className="text-mute">

@@ -57,7 +57,11 @@ export function JobScreen({ job: first }: { job: JobView }) {
 function SheetRow({ jobId, line }: { jobId: string; line: SheetLine }) {
   return (
     <li>
-      <Link href={`/jobs/${jobId}/sheets/${line.sheet}`} prefetch={false} className="job-row">
+      <Link
+        href={`/jobs/${jobId}/sheets/${line.sheet}`}
+        prefetch={false}
+        className="grid gap-1 rounded-plate border border-rule bg-card p-5 text-ink no-underline hover:border-ink max-sm:p-4"
+      >
         <b className="font-head text-[22px]">{line.name}</b>
         <span>
           sheet {line.sheet}, revision {line.revision}

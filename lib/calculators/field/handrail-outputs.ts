@@ -1,10 +1,11 @@
 import { flag, groupOf, listOf, onDial, onTape, shapeOf, toDecimals, words } from '../outputs'
 
-const end = groupOf('End', {
-  saw: onDial('Saw, 0 is square'),
-  exact: toDecimals('Exactly', 'deg', 2),
-  longPoint: words('Long point'),
-})
+const endOf = (label: string) =>
+  groupOf(label, {
+    saw: onDial('Saw, 0 is square'),
+    exact: toDecimals('Exactly', 'deg', 2),
+    longPoint: words('Long point'),
+  })
 
 const part = groupOf('Part', {
   mark: words('Mark'),
@@ -17,8 +18,8 @@ const part = groupOf('Part', {
   setbackA: onTape('Low end loses'),
   setbackB: onTape('High end loses'),
   cuts: words('Between cuts'),
-  endA: end,
-  endB: end,
+  endA: endOf('Low end'),
+  endB: endOf('High end'),
   note: words('Note'),
   turn: words('Quarter turn'),
   corners: shapeOf('Corners in elevation'),

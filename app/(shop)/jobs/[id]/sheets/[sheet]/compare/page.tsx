@@ -26,8 +26,12 @@ export default async function ComparePage({ params, searchParams }: PageProps<'/
   if (!isCalculatorId(is.calculator)) notFound()
   const { inputs, outputs } = await loadCalculator(is.calculator)
   const precision = precisionOf(actor.preferences)
-  const measured = changesOf(inputLeaves(inputs, was.inputs), inputLeaves(inputs, is.inputs))
-  const cut = changesOf(outputLeaves(outputs, was.results.outputs), outputLeaves(outputs, is.results.outputs))
+  const measured = changesOf(inputLeaves(inputs, was.inputs), inputLeaves(inputs, is.inputs), precision)
+  const cut = changesOf(
+    outputLeaves(outputs, was.results.outputs),
+    outputLeaves(outputs, is.results.outputs),
+    precision,
+  )
   return (
     <>
       <p className="crumb">
