@@ -10,6 +10,7 @@ import { InputField } from './input-field'
 import { PadDock } from './pad-dock'
 import { usePad } from './use-pad'
 import { usePhone } from './use-phone'
+import { useTypedEarly } from './use-typed-early'
 
 interface CalculatorFormProps {
   calculator: AnyCalculator
@@ -25,6 +26,7 @@ interface CalculatorFormProps {
 /** The inputs of an entry, in its own order; on a phone with strip and pad. */
 export function CalculatorForm({ calculator, raw, set, marks, precision, padDown, children }: CalculatorFormProps) {
   const form = useRef<HTMLFormElement>(null)
+  useTypedEarly(form, raw, set)
   const phone = usePhone()
   const { inputs, example } = calculator
   const { main, more } = splitFields(inputs, example)
