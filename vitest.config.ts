@@ -3,7 +3,10 @@ import { defineConfig } from 'vitest/config'
 const alias = { '@': import.meta.dirname, 'server-only': `${import.meta.dirname}/tests/support/server-only.ts` }
 
 /** Pure suites run in parallel; suites that share a server or a database run one file at a time. */
-function project(name: string, options: { environment?: 'node' | 'jsdom'; serial?: boolean; testTimeout?: number } = {}) {
+function project(
+  name: string,
+  options: { environment?: 'node' | 'jsdom'; serial?: boolean; testTimeout?: number } = {},
+) {
   return {
     resolve: { alias },
     test: {

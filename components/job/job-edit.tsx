@@ -30,6 +30,11 @@ export function JobEdit({ job, onDone }: Props) {
     resolver: zodResolver(jobSchema),
     defaultValues: { name, place, client: whom, notes },
   })
+  const showTheirs = async () => {
+    const current = await client.fetchQuery({ ...jobQuery(job.id), staleTime: 0 })
+    setTheirs(current)
+    setVersion(current.version)
+  }
   const { submit, sending, problem } = useSending(form, async (typed) => {
     try {
       await changeJob(job.id, { ...typed, version })
@@ -40,11 +45,6 @@ export function JobEdit({ job, onDone }: Props) {
     await client.invalidateQueries({ queryKey: ['jobs'] })
     onDone()
   })
-  const showTheirs = async () => {
-    const current = await client.fetchQuery({ ...jobQuery(job.id), staleTime: 0 })
-    setTheirs(current)
-    setVersion(current.version)
-  }
   return (
     <Panel className="mb-8 max-w-[40rem]">
       <form onSubmit={submit} method="post" noValidate>

@@ -3,7 +3,7 @@
 import { useInfiniteQuery, useQueryClient } from '@tanstack/react-query'
 import { useRouter } from 'next/navigation'
 import { useId, useState } from 'react'
-import { useForm } from 'react-hook-form'
+import { useForm, useWatch } from 'react-hook-form'
 import { FormProblem } from '@/components/account/form-problem'
 import { useSending } from '@/components/account/use-sending'
 import { Button } from '@/components/ui/button'
@@ -14,7 +14,7 @@ import { usePreferences } from '@/components/ui/use-preferences'
 import { createJob, jobsQuery } from '@/lib/queries/jobs'
 import { saveSheet } from '@/lib/queries/sheets'
 import { precisionOf } from '@/lib/schemas/precision'
-import type { Saving } from './save-to-job'
+import type { Saving } from './saving'
 import { SheetHeadFields, type SheetHead } from './sheet-head-fields'
 import { today } from './today'
 
@@ -45,9 +45,10 @@ export function SaveForm({ calculator, inputs, jobId, onClose }: Saving & { onCl
       note: '',
     },
   })
-  const { register, watch, formState } = form
-  const { submit, sending, problem } = useSending<Typed, Typed>(form, async ({ job, newJob, ...head }) => {
-    const kept = job || (await createJob({ name: newJob }, keys.job)).id
+  const { register, control, formState } = form
+  const job = useWatch({ control, name: 'job' })
+  const { submit, sending, problem } = useSending<Typed, Typed>(form, async ({ job: chosen, newJob, ...head }) => {
+    const kept = chosen || (await createJob({ name: newJob }, keys.job)).id
     const { sheet } = await saveSheet(
       kept,
       { ...head, calculator, inputs, precision: precisionOf(preferences) },
@@ -73,7 +74,7 @@ export function SaveForm({ calculator, inputs, jobId, onClose }: Saving & { onCl
           ))}
         </select>
       </div>
-      {watch('job') === '' && (
+      {job === '' && (
         <TextField
           label="New job"
           hint="As the shop calls it."

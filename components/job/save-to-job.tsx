@@ -6,14 +6,7 @@ import { Button } from '@/components/ui/button'
 import { useMe } from '@/components/ui/me'
 import { QueryProvider } from './query-provider'
 import { SaveForm } from './save-form'
-
-export interface Saving {
-  calculator: string
-  /** As typed or as numbers: the server reads and computes them again. */
-  inputs: Record<string, unknown>
-  /** Job to offer first. */
-  jobId?: string
-}
+import type { Saving } from './saving'
 
 /** Opens the dialog that keeps a cut sheet in a job; signed out, says where to sign in and comes back here. */
 export function SaveToJob(saving: Saving) {

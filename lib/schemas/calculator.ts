@@ -72,7 +72,8 @@ function outputSchema(output: Output): z.ZodType {
 /** A value may stand alone or as a row of marks. */
 const manyOf = (schema: z.ZodType) => z.union([schema, z.array(schema)])
 
-const labelWithUnit = (label: string, unit: string) => (unit === 'text' || unit === 'flag' ? label : `${label}, ${unit}`)
+const labelWithUnit = (label: string, unit: string) =>
+  unit === 'text' || unit === 'flag' ? label : `${label}, ${unit}`
 
 function valueSchema(unit: string): z.ZodType {
   if (unit === 'text') return z.union([z.string(), z.number()])

@@ -12,7 +12,7 @@ import type { Suite } from './plan'
 import { runsIn } from './runs'
 
 /** The tests' own build: a running `npm start` reads its pages from `.next`, and keeps them. */
-const testBuild = '.data/test-build'
+export const testBuild = '.data/test-build'
 
 /** What the suites stand on, each thing made when the first suite asks for it and shared by those after. */
 export class Stage {

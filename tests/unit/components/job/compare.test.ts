@@ -44,7 +44,10 @@ describe('two revisions of a sheet', () => {
   })
 
   it('show a part that one of them does not have', async () => {
-    const [was, is] = await Promise.all([sheetOf({ top: { type: 'none' } }), sheetOf({ top: { type: 'level', length: 12 } })])
+    const [was, is] = await Promise.all([
+      sheetOf({ top: { type: 'none' } }),
+      sheetOf({ top: { type: 'level', length: 12 } }),
+    ])
     const added = changesOf(cut(was), cut(is), defaultPrecision).filter(({ before }) => before === undefined)
     expect(added.map(({ label }) => label)).toContain('Part B, mark')
   })
