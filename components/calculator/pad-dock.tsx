@@ -47,7 +47,6 @@ export function PadDock({ pad, field, text, precision, form }: PadDockProps) {
     const at = all.findIndex((box) => box.name === pad.active)
     const box = all[(at + 1) % all.length]
     box?.focus({ preventScroll: true })
-    box?.scrollIntoView({ block: 'center' })
   }
   const keyboard = () => {
     pad.askKeyboard()

@@ -44,7 +44,11 @@ export function QuantityRow({
         numeric
         value={value}
         onChange={(event) => onChange(event.target.value)}
-        onFocus={onActive}
+        onFocus={({ currentTarget }) => {
+          onActive()
+          // With the device's keyboard down nobody else moves the row out from under the pad.
+          if (!keyboard) currentTarget.closest('.quantity-row')?.scrollIntoView({ block: 'nearest' })
+        }}
         unit={unitWords[field.unit]}
         inputMode={keyboard ? undefined : 'none'}
         data-pad=""

@@ -8,7 +8,7 @@ const symbolsOf = ({ inputs, outputs }: Pick<AnyCalculator, 'inputs' | 'outputs'
   for (const [name, field] of [...Object.entries(inputs), ...Object.entries(outputs)]) {
     if ('symbol' in field && typeof field.symbol === 'string') symbols.set(name, field.symbol)
   }
-  return (name: string) => symbols.get(name) ?? `\text{${wordsOf(name)}}`
+  return (name: string) => symbols.get(name) ?? `\\text{${wordsOf(name)}}`
 }
 
 /** `sawSquareIs0` as a person reads it: saw square is 0. */

@@ -40,6 +40,7 @@ function subscribe(listener: () => void): () => void {
   document.addEventListener('click', settle, true)
   return () => {
     listeners.delete(listener)
+    settle()
     window.removeEventListener('popstate', moved)
     window.removeEventListener('pagehide', settle)
     document.removeEventListener('click', settle, true)
