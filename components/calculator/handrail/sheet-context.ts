@@ -1,0 +1,27 @@
+import { createContext, use } from 'react'
+import type { Caution, Note, Values } from '@/lib/calculators/define'
+import type { Precision } from '@/lib/calculators/fields'
+import type { Fault } from '@/lib/calculators/read'
+import type { PadState } from '../use-pad'
+import type { Measure } from './measure'
+import type { MeasureStore } from './measure-store'
+
+/** What every part of the field sheet works with. */
+export interface FieldSheetState {
+  measure: Measure
+  store: MeasureStore
+  faults: readonly Fault[]
+  notes: readonly Note[]
+  cautions: readonly Caution<Values, Values>[]
+  pad: PadState
+  phone: boolean
+  precision: Precision
+}
+
+export const FieldSheetContext = createContext<FieldSheetState | null>(null)
+
+export function useFieldSheet(): FieldSheetState {
+  const sheet = use(FieldSheetContext)
+  if (!sheet) throw new Error('A part of the field sheet stands outside it.')
+  return sheet
+}
