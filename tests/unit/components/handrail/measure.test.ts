@@ -17,7 +17,7 @@ const everything: Measure = {
   flights: [
     { way: 'count', risers: '7', rise: '7 1/4', run: '10.5' },
     { way: 'rake', rake: "6' 2 1/2", pitch: '33.7', firstRise: '7', run: '11' },
-    { way: 'tape', nosingRise: '35', nosingRun: '55', nosingRake: '65 3/16' },
+    { way: 'tape', nosingRise: '35', nosingRun: '55', nosingRake: '65 3/16', firstRise: '7' },
   ],
   landings: [
     { length: '48', slopeInPerFt: '-1/8' },

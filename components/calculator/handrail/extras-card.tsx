@@ -1,0 +1,84 @@
+'use client'
+
+import { ChoiceField } from '../../ui/choice-field'
+import { Panel } from '../../ui/panel'
+import { BracketPlaces } from './bracket-places'
+import { placeOf } from './fields-at'
+import { extraNames, withText, type ExtraName } from './measure'
+import { plainExtraKeys } from './measure-keys'
+import { Measured } from './measured'
+import { CautionsBeside } from './sheet-card'
+import { useFieldSheet } from './sheet-context'
+
+const extras: Readonly<Record<ExtraName, string>> = {
+  brackets: 'Brackets',
+  stock: 'Stock',
+  weld: 'Filler and time',
+  code: 'Code rows',
+  volutes: 'Volutes',
+}
+
+/** What is not of the stair itself: folded until it is wanted, or until something in it is off. */
+export function ExtrasCard() {
+  const { faults } = useFieldSheet()
+  const off = faults.some(({ field }) => extraNames.some((name) => field === name || field.startsWith(`${name}.`)))
+  return (
+    <Panel className="sheet-card sheet-extras">
+      <details open={off || undefined}>
+        <summary>Brackets, stock, filler, code rows, volutes</summary>
+        {extraNames.map((name) => (
+          <ExtraSet key={name} name={name} />
+        ))}
+      </details>
+    </Panel>
+  )
+}
+
+function ExtraSet({ name }: { name: ExtraName }) {
+  const { measure, store } = useFieldSheet()
+  const on = measure[name].on === 'yes'
+  const turn = () => store.type((now) => withText(now, `${name}.on`, on ? '' : 'yes'))
+  return (
+    <fieldset className="extra-set">
+      <legend className="sr-only">{placeOf(name)}</legend>
+      <label className="extra-switch">
+        <input type="checkbox" checked={on} onChange={turn} />
+        <span>{extras[name]}</span>
+      </label>
+      {on && (name === 'brackets' ? <BracketMeasures /> : <PlainMeasures name={name} />)}
+      {on && <CautionsBeside name={name === 'code' ? 'checks' : name} />}
+    </fieldset>
+  )
+}
+
+const PlainMeasures = ({ name }: { name: Exclude<ExtraName, 'brackets'> }) => (
+  <div className="measure-pair">
+    {plainExtraKeys[name].map((key) => (
+      <Measured key={key} path={`${name}.${key}`} />
+    ))}
+  </div>
+)
+
+function BracketMeasures() {
+  const { measure, store } = useFieldSheet()
+  const field = measure.brackets.way === 'field'
+  return (
+    <>
+      <ChoiceField
+        label="Set out"
+        options={[
+          { value: 'spaced', name: 'Evenly' },
+          { value: 'field', name: 'Where taped' },
+        ]}
+        value={field ? 'field' : 'spaced'}
+        onChange={(way) => store.type((now) => withText(now, 'brackets.way', way))}
+      />
+      {field && <BracketPlaces />}
+      <div className="measure-pair">
+        {(field ? ['jointClear'] : ['endDistance', 'maxSpacing']).map((key) => (
+          <Measured key={key} path={`brackets.${key}`} />
+        ))}
+      </div>
+    </>
+  )
+}
