@@ -10,6 +10,7 @@ const text = localFont({
   variable: '--font-text',
   weight: '200 800',
   display: 'swap',
+  fallback: ['text spare', 'text wide spare'],
 })
 const head = localFont({
   src: '../fonts/barlow-condensed-latin-600-normal.woff2',
@@ -17,6 +18,7 @@ const head = localFont({
   weight: '600',
   display: 'swap',
   adjustFontFallback: 'Arial',
+  fallback: ['head spare', 'head wide spare'],
 })
 const mono = localFont({
   src: '../fonts/atkinson-hyperlegible-mono-latin-wght-normal.woff2',
@@ -24,6 +26,7 @@ const mono = localFont({
   weight: '200 800',
   display: 'swap',
   adjustFontFallback: false,
+  fallback: ['mono spare'],
 })
 
 export const metadata: Metadata = {
