@@ -18,13 +18,13 @@ function goTo(event: MouseEvent, field: string): void {
 }
 
 /** What keeps the rail from being worked out, each a way to its box. The list does not move the sheet. */
-export function FaultSummary({ faults }: { faults: readonly Fault[] }) {
+export function FaultSummary({ faults, shown }: { faults: readonly Fault[]; shown: boolean }) {
   if (faults.length === 0) return null
   return (
     <section className="fault-summary" role="status" aria-label="To mend">
       <p>
-        {faults.length === 1 ? 'One measure is' : `${faults.length} measures are`} missing or cannot be read. The rail
-        shown is the last one that could be worked out.
+        {faults.length === 1 ? 'One measure is' : `${faults.length} measures are`} missing or cannot be read.
+        {shown && ' The rail shown is the last one that could be worked out.'}
       </p>
       <ul>
         {faults.map(({ field, message }) => (

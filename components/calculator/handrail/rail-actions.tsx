@@ -1,0 +1,45 @@
+'use client'
+
+import { useState, type ReactNode } from 'react'
+import { SaveToJob } from '../../job/save-to-job'
+import { Button, ButtonLink } from '../../ui/button'
+import { measureQuery } from './measure-address'
+import { cutListText } from './plain-text'
+import type { HandrailState } from './use-handrail'
+
+interface RailActionsProps {
+  state: HandrailState
+  /** Stands in for saving where a sheet that is already kept is being revised. */
+  actions?: ReactNode
+}
+
+/** Print the cut sheet, keep it in a job, copy it as text. Numbers left from before are not handed on. */
+export function RailActions({ state, actions }: RailActionsProps) {
+  const { raw, rail, stale, measure, precision, preferences, origin } = state
+  const [said, setSaid] = useState('')
+  const copy = async () => {
+    if (!rail) return
+    const address = `${location.origin}${location.pathname}${measureQuery(measure)}`
+    try {
+      await navigator.clipboard.writeText(cutListText(rail, { precision, preferences }, address))
+      setSaid('Copied.')
+    } catch {
+      setSaid('This device does not let a page copy. Select the numbers and copy them by hand.')
+    }
+  }
+  if (stale || !rail) return <p className="rail-actions-wait">Mend the measures, then print, save or copy.</p>
+  return (
+    <div className="actions rail-actions no-print">
+      {actions ?? (origin === 'own' ? <SaveToJob calculator="handrail" inputs={raw} /> : null)}
+      <ButtonLink href={`/handbook/handrail/sheet${measureQuery(measure)}`} prefetch={false}>
+        Print cut sheet
+      </ButtonLink>
+      <Button variant="quiet" onClick={() => void copy()}>
+        Copy as text
+      </Button>
+      <p role="status" className="basis-full text-mute empty:hidden">
+        {said}
+      </p>
+    </div>
+  )
+}
