@@ -1,6 +1,7 @@
 'use client'
 
 import { useSyncExternalStore } from 'react'
+import { send } from '@/lib/queries/send'
 import type { Me } from '@/lib/schemas/views'
 import { keepPreferences } from './preferences-store'
 
@@ -17,8 +18,7 @@ async function ask(): Promise<void> {
 
 async function fetchMe(): Promise<Me | null> {
   try {
-    const response = await fetch('/api/me', { headers: { accept: 'application/json' } })
-    return response.ok ? ((await response.json()) as Me | null) : null
+    return await send<Me | null>('GET', '/api/me')
   } catch {
     return null
   }

@@ -1,6 +1,7 @@
 'use client'
 
 import { useRef } from 'react'
+import { savePreferences } from '@/lib/queries/account'
 import type { Preferences } from '@/lib/schemas/account'
 import { Button } from './button'
 import { ChoiceField } from './choice-field'
@@ -35,11 +36,7 @@ const themes = [
 function change(wanted: Partial<Preferences>, signedIn: boolean): void {
   keepPreferences(wanted)
   if (!signedIn) return
-  void fetch('/api/account/preferences', {
-    method: 'PATCH',
-    headers: { 'content-type': 'application/json' },
-    body: JSON.stringify(wanted),
-  }).catch(() => undefined)
+  savePreferences(wanted).catch(() => undefined)
 }
 
 /** The fields alone, for the dialog and for the account page. */
