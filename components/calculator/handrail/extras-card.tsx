@@ -23,8 +23,8 @@ export function ExtrasCard() {
   const { faults } = useFieldSheet()
   const off = faults.some(({ field }) => extraNames.some((name) => field === name || field.startsWith(`${name}.`)))
   return (
-    <Panel className="sheet-card sheet-extras">
-      <details open={off || undefined}>
+    <Panel className="sheet-card px-5 py-2 max-sm:px-4">
+      <details className="sheet-extras" open={off || undefined}>
         <summary>Brackets, stock, filler, code rows, volutes</summary>
         {extraNames.map((name) => (
           <ExtraSet key={name} name={name} />

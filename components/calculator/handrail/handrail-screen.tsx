@@ -13,45 +13,55 @@ import { placedFaults } from './placed-faults'
 import { RailActions } from './rail-actions'
 import { RailPlate } from './rail-plate'
 import { RailResults } from './rail-results'
-import { useHandrail } from './use-handrail'
+import type { MeasureStore } from './measure-store'
+import { pageStore, useHandrail, useKept } from './use-handrail'
 
 interface HandrailScreenProps {
+  /** The sheet to work on; left out, the one of the handbook's page. */
+  store?: MeasureStore
   typeset: Typeset
   /** What saves this measure, where not the plain act does. */
   actions?: ReactNode
+  /** Ways on. */
+  aside?: ReactNode
   /** Sources and proof, which do not change with the numbers. */
   children?: ReactNode
 }
 
 /** A stair as it was measured, and the whole rail that follows from it. */
-export function HandrailScreen({ typeset, actions, children }: HandrailScreenProps) {
-  const state = useHandrail()
+export function HandrailScreen({ store = pageStore, ...rest }: HandrailScreenProps) {
+  const kept = useKept(store)
+  return (
+    <LitProvider>
+      <OriginBar {...kept} store={store} />
+      <Bench key={kept.sheet} store={store} {...rest} />
+    </LitProvider>
+  )
+}
+
+function Bench({ store, typeset, actions, aside, children }: HandrailScreenProps & { store: MeasureStore }) {
+  const state = useHandrail(store)
   const { calculator, rail, answer, stale, precision, preferences, cautions } = state
-  const faults = placedFaults(state.faults)
+  const faults = placedFaults(state.measure, state.faults)
   useLastUsed(calculator.id)
   const alone = cautions.filter(({ beside }) => beside === undefined)
   return (
-    <LitProvider>
-      <OriginBar {...state} />
+    <>
       <div className="rail-bench">
         <FieldSheet state={{ ...state, faults }} />
         <div className="rail-view">
-          {rail ? (
-            <RailPlate {...{ rail, precision, preferences, stale }} />
-          ) : (
-            <p className="rail-none">Give the measures from the bottom of the stair up, and the rail is drawn here.</p>
-          )}
-          <FaultSummary faults={faults} shown={rail !== null} />
+          <div className="rail-head">
+            {rail ? (
+              <RailPlate {...{ rail, precision, preferences, stale }} />
+            ) : (
+              <p className="rail-none">
+                Give the measures from the bottom of the stair up, and the rail is drawn here.
+              </p>
+            )}
+            <FaultSummary faults={faults} shown={rail !== null} />
+          </div>
           <RailActions state={state} actions={actions} />
-        </div>
-      </div>
-      {rail && <RailResults state={state} rail={rail} />}
-      <div className="below">
-        <div className="below-main">
-          {answer && <Working calculator={calculator} steps={answer.steps} stale={stale} typeset={typeset} />}
-          {children}
-        </div>
-        <div className="below-side">
+          {rail && <RailResults state={state} rail={rail} />}
           {alone.map(({ signal, text }) => (
             <CautionPanel key={text} signal={signal}>
               {text}
@@ -59,6 +69,13 @@ export function HandrailScreen({ typeset, actions, children }: HandrailScreenPro
           ))}
         </div>
       </div>
-    </LitProvider>
+      <div className="below">
+        <div className="below-main">
+          {answer && <Working calculator={calculator} steps={answer.steps} stale={stale} typeset={typeset} />}
+          {children}
+        </div>
+        <div className="below-side">{aside}</div>
+      </div>
+    </>
   )
 }

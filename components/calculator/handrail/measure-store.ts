@@ -8,7 +8,9 @@ export interface Kept {
   measure: Measure
   origin: Origin
   /** What the last great change took away, to be brought back, and what to call it. */
-  undo: { measure: Measure; origin: Origin; says: string } | null
+  undo: { measure: Measure; origin: Origin; sheet: number; says: string } | null
+  /** Counts sheets begun anew: numbers of the one before have no place on the next. */
+  sheet: number
 }
 
 /** Browsers refuse an address that changes at every keystroke; the sheet follows at once, address and draft a moment later. */
@@ -39,30 +41,47 @@ export interface MeasureStore {
   type: (change: (measure: Measure) => Measure) => void
   /** A change that can be taken back as a whole. */
   replace: (measure: Measure, says: string) => void
+  /** An empty sheet, or another one as a whole; can be taken back too. */
+  begin: (measure: Measure, says: string) => void
   undo: () => void
 }
 
-/** The one field sheet of a page: address first, then the draft of this device, then the example. */
-export function measureStore(example: Measure): MeasureStore {
-  const first: Kept = { measure: example, origin: 'example', undo: null }
+/** Other things that the address says, such as the saved sheet that is being revised, stay. */
+function addressOf(measure: Measure): string {
+  const others = new URLSearchParams(location.search)
+  others.delete(measureParameter)
+  const rest = others.toString()
+  return `${location.pathname}${measureQuery(measure)}${rest === '' ? '' : `&${rest}`}${location.hash}`
+}
+
+/**
+ * The one field sheet of a page: address first, then the draft of this device, then the example.
+ * A sheet that was `saved` starts from what was kept, and leaves the draft alone.
+ */
+export function measureStore(start: Measure, saved = false): MeasureStore {
+  const first: Kept = { measure: start, origin: saved ? 'own' : 'example', undo: null, sheet: 0 }
   const listeners = new Set<() => void>()
   let kept: Kept | null = null
   let timer: ReturnType<typeof setTimeout> | undefined
   let unsettled = false
 
   function opened(): Kept {
-    const found = readMeasure(new URLSearchParams(location.search).get(measureParameter)) ?? readMeasure(draft())
+    const found =
+      readMeasure(new URLSearchParams(location.search).get(measureParameter)) ?? (saved ? null : readMeasure(draft()))
     if (!found) return first
-    const origin = writeMeasure(found) === writeMeasure(example) ? 'example' : 'own'
-    return { measure: found, origin, undo: null }
+    const origin = !saved && writeMeasure(found) === writeMeasure(start) ? 'example' : 'own'
+    return { measure: found, origin, undo: null, sheet: 0 }
   }
   const now = () => (kept ??= opened())
+  const keep = ({ origin, measure }: Kept) => {
+    if (!saved) keepDraft(origin === 'example' ? '' : writeMeasure(measure))
+  }
   function settle(): void {
     clearTimeout(timer)
     if (!unsettled || !kept) return
     unsettled = false
-    keepDraft(kept.origin === 'example' ? '' : writeMeasure(kept.measure))
-    history.replaceState(history.state, '', `${location.pathname}${measureQuery(kept.measure)}${location.hash}`)
+    keep(kept)
+    history.replaceState(history.state, '', addressOf(kept.measure))
   }
   function change(next: Kept): void {
     kept = next
@@ -70,6 +89,10 @@ export function measureStore(example: Measure): MeasureStore {
     clearTimeout(timer)
     timer = setTimeout(settle, settleMs)
     for (const listener of listeners) listener()
+  }
+  const before = (says: string): Kept['undo'] => {
+    const { measure, origin, sheet } = now()
+    return { measure, origin, sheet, says }
   }
   function moved(): void {
     kept = null
@@ -94,19 +117,17 @@ export function measureStore(example: Measure): MeasureStore {
         clearTimeout(timer)
         // What was typed on a page that has been left is none of the next one's address, but stays as the draft.
         if (listeners.size > 0) return
-        if (kept && unsettled && kept.origin === 'own') keepDraft(writeMeasure(kept.measure))
+        if (kept && unsettled) keep(kept)
         kept = null
         unsettled = false
       }
     },
     type: (edit) => change({ ...now(), measure: edit(now().measure), origin: 'own' }),
-    replace(measure, says) {
-      const { measure: before, origin } = now()
-      change({ measure, origin: 'own', undo: { measure: before, origin, says } })
-    },
+    replace: (measure, says) => change({ measure, origin: 'own', undo: before(says), sheet: now().sheet }),
+    begin: (measure, says) => change({ measure, origin: 'own', undo: before(says), sheet: now().sheet + 1 }),
     undo() {
       const { undo } = now()
-      if (undo) change({ measure: undo.measure, origin: undo.origin, undo: null })
+      if (undo) change({ measure: undo.measure, origin: undo.origin, sheet: undo.sheet, undo: null })
     },
   }
 }

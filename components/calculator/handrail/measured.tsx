@@ -18,6 +18,8 @@ export function Measured({ path, optional = false }: { path: string; optional?: 
   const value = textAt(measure, path)
   const fault = faults.find((one) => one.field === path)?.message
   const remarks = notes.filter((note) => note.field === path)
+  // An empty box is not wrong yet: it says what it needs, but not in red.
+  const missing = value.trim() === '' ? fault : undefined
   const write = (text: string) => store.type((now) => withText(now, path, text))
   if (field.kind === 'choice')
     return (
@@ -42,10 +44,11 @@ export function Measured({ path, optional = false }: { path: string; optional?: 
       onActive={() => pad.activate(path)}
       keyboard={!phone || pad.keyboard}
       placeholder={fallbackText(field, precision) ?? (optional ? 'if taped' : undefined)}
-      fault={fault}
+      fault={missing ? undefined : fault}
       below={
-        (field.hint || remarks.length > 0) && (
+        (field.hint || missing || remarks.length > 0) && (
           <>
+            {missing && <span className="field-note field-needed">{missing}</span>}
             {field.hint && <span className="field-hint-text">{field.hint}</span>}
             {remarks.map(({ message }) => (
               <span key={message} className="field-note">

@@ -6,7 +6,7 @@ import type { HandrailState } from './use-handrail'
 
 /** Says whose numbers stand on the sheet, and takes the last great change back. */
 export function OriginBar({ origin, undo, store }: Pick<HandrailState, 'origin' | 'undo' | 'store'>) {
-  const clear = () => store.replace(blankMeasure, 'The sheet is cleared.')
+  const clear = () => store.begin(blankMeasure, 'The sheet is cleared.')
   return (
     <div className="origin-bar no-print">
       {origin === 'example' ? (

@@ -20,6 +20,8 @@ export function sectionText({ shape, depth, width }: Section, den: number): stri
     : `${size(depth)} × ${size(width)} ${shapeWords[shape]}`
 }
 
+const slopeText = (slope: number) => `${slope < 0 ? '−' : ''}${Number(Math.abs(slope).toFixed(2))}°`
+
 interface PartsTableProps {
   parts: readonly RailPart[]
   section: Section
@@ -64,7 +66,7 @@ function PartRow({ part, reading }: { part: RailPart; reading: Reading }) {
       <th role="rowheader" scope="row">
         <PartMark mark={part.mark} />
         <small>
-          {part.kind}, {Number(part.slope.toFixed(2))}°
+          {part.kind}, {slopeText(part.slope)}
         </small>
       </th>
       <td role="cell" data-head="Top edge">

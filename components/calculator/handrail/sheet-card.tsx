@@ -19,7 +19,7 @@ export function SheetCard({ title, mark, act, children }: SheetCardProps) {
   const id = useId()
   const light = usePartLight(mark)
   return (
-    <Panel className="sheet-card" aria-labelledby={id} {...light}>
+    <Panel className="sheet-card px-5 pt-3 pb-1 max-sm:px-4" aria-labelledby={id} {...light}>
       <header className="sheet-card-head">
         <h2 id={id}>{title}</h2>
         {mark && (

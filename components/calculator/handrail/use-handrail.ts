@@ -16,7 +16,13 @@ import { measureStore, type Kept, type MeasureStore } from './measure-store'
 
 const calculator = asAny(handrail)
 const exampleMeasure = measureFromInputs(handrail.example)
-const pageStore = measureStore(exampleMeasure)
+/** The sheet of the handbook's own page. */
+export const pageStore = measureStore(exampleMeasure)
+
+/** A sheet filled from inputs as a saved cut sheet keeps them. */
+export const savedStore = (inputs: RawInputs): MeasureStore => measureStore(measureFromInputs(inputs), true)
+
+export const useKept = (store: MeasureStore): Kept => useSyncExternalStore(store.subscribe, store.now, store.atFirst)
 const none: readonly Caution<Values, Values>[] = []
 
 /** The rail that is drawn: what was given for it and what came out. */
@@ -36,8 +42,8 @@ export interface HandrailState extends Standing, Kept {
 }
 
 /** The handrail at work: the field sheet as typed, the rail that follows from it, and how this reader reads it. */
-export function useHandrail(store: MeasureStore = pageStore): HandrailState {
-  const kept = useSyncExternalStore(store.subscribe, store.now, store.atFirst)
+export function useHandrail(store: MeasureStore): HandrailState {
+  const kept = useKept(store)
   const preferences = usePreferences()
   const precision = useMemo(() => precisionOf(preferences), [preferences])
   const raw = useMemo(() => inputsOf(kept.measure), [kept.measure])
