@@ -42,10 +42,12 @@ export default async function HandrailPage() {
         </Link>
       </p>
       <NeedsScripts />
-      <HandrailScreen typeset={typesetAhead(calculator)}>
+      <HandrailScreen
+        typeset={typesetAhead(calculator)}
+        aside={<RelatedLinks related={related} fields={calculator.inputs} raw={{}} />}
+      >
         <Sources sources={handrail.sources} basis={handrail.basis} />
         <Proof rows={proof} outputs={handrail.outputs} />
-        <RelatedLinks related={related} fields={calculator.inputs} raw={{}} />
       </HandrailScreen>
     </article>
   )
