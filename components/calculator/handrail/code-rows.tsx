@@ -30,7 +30,7 @@ export function CodeRows({ rows }: { rows: readonly CodeRow[] | undefined }) {
       <p className="rail-says">
         Your figures beside limits as printed. The adopted local code and a licensed professional decide.
       </p>
-      <div className="table-scroll" tabIndex={0} role="region" aria-label="Code rows">
+      <div className="table-scroll" tabIndex={0} role="region" aria-label="Rows, limits and sources">
         <table>
           <thead>
             <tr>

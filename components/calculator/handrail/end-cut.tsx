@@ -46,7 +46,7 @@ export function EndCut({ end, step, preferences }: EndCutProps) {
       <b className="cut-saw">
         <Dial deg={sawReading(end.saw, preferences)} step={step} />
       </b>
-      <span className="cut-face">
+      <span className={end.longPoint === 'room side (plan)' ? 'cut-face cut-face-plan' : 'cut-face'}>
         <FaceSign face={end.longPoint} /> {faceWords[end.longPoint]}
       </span>
       <small>exactly {Number(sawReading(end.exact, preferences).toFixed(2))}°</small>

@@ -70,7 +70,8 @@ export function measureStore(start: Measure, saved = false): MeasureStore {
       readMeasure(new URLSearchParams(location.search).get(measureParameter)) ?? (saved ? null : readMeasure(draft()))
     if (!found) return first
     const origin = !saved && writeMeasure(found) === writeMeasure(start) ? 'example' : 'own'
-    return { measure: found, origin, undo: null, sheet: 0 }
+    // The page was made ahead with the example: its rail is none of this sheet's.
+    return { measure: found, origin, undo: null, sheet: origin === 'own' ? 1 : 0 }
   }
   const now = () => (kept ??= opened())
   const keep = ({ origin, measure }: Kept) => {

@@ -1,11 +1,13 @@
 'use client'
 
-import { useState, type ReactNode } from 'react'
-import { SaveToJob } from '../../job/save-to-job'
+import { lazy, Suspense, useState, type ReactNode } from 'react'
 import { Button, ButtonLink } from '../../ui/button'
 import { measureQuery } from './measure-address'
 import { cutListText } from './plain-text'
 import type { HandrailState } from './use-handrail'
+
+/** Keeping a sheet brings forms and queries along: fetched once there is a measure to keep. */
+const SaveToJob = lazy(async () => ({ default: (await import('../../job/save-to-job')).SaveToJob }))
 
 interface RailActionsProps {
   state: HandrailState
@@ -30,7 +32,12 @@ export function RailActions({ state, actions }: RailActionsProps) {
   if (stale || !rail) return <p className="rail-actions-wait">Mend the measures, then print, save or copy.</p>
   return (
     <div className="actions rail-actions no-print">
-      {actions ?? (origin === 'own' ? <SaveToJob calculator="handrail" inputs={raw} /> : null)}
+      {actions ??
+        (origin === 'own' && (
+          <Suspense fallback={<Button disabled>Save to a job</Button>}>
+            <SaveToJob calculator="handrail" inputs={raw} />
+          </Suspense>
+        ))}
       <ButtonLink href={`/handbook/handrail/sheet${measureQuery(measure)}`} prefetch={false}>
         Print cut sheet
       </ButtonLink>
