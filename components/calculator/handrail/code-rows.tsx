@@ -22,8 +22,7 @@ function valueText(value: CodeRow['value']): string {
 }
 
 /** Figures of this rail beside limits as printed. */
-export function CodeRows({ rows }: { rows: readonly CodeRow[] | undefined }) {
-  if (!rows) return null
+export function CodeRows({ rows }: { rows: readonly CodeRow[] }) {
   return (
     <section aria-labelledby="code-rows">
       <h2 id="code-rows">Code rows</h2>

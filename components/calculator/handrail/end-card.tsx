@@ -15,7 +15,7 @@ export function EndCard({ end, mark }: { end: 'bottom' | 'top'; mark?: string })
   const texts = measure[end]
   return (
     <SheetCard title={end === 'bottom' ? 'Bottom end' : 'Top end'} mark={mark}>
-      <Measured path={`${end}.type`} />
+      <Measured path={`${end}.type`} label="How it ends" />
       {endAsks(end, texts.type).map((key) => (
         <Measured key={key} path={`${end}.${key}`} optional={optional.has(key)} />
       ))}

@@ -5,6 +5,7 @@ import { Panel } from '../../ui/panel'
 import { BracketPlaces } from './bracket-places'
 import { placeOf } from './fields-at'
 import { extraNames, withText, type ExtraName } from './measure'
+import { turnExtra } from './measure-edits'
 import { plainExtraKeys } from './measure-keys'
 import { Measured } from './measured'
 import { CautionsBeside } from './sheet-card'
@@ -37,7 +38,7 @@ export function ExtrasCard() {
 function ExtraSet({ name }: { name: ExtraName }) {
   const { measure, store } = useFieldSheet()
   const on = measure[name].on === 'yes'
-  const turn = () => store.type((now) => withText(now, `${name}.on`, on ? '' : 'yes'))
+  const turn = () => store.type((now) => turnExtra(now, name))
   return (
     <fieldset className="extra-set">
       <legend className="sr-only">{placeOf(name)}</legend>

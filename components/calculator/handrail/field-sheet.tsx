@@ -1,8 +1,7 @@
 'use client'
 
-import { Fragment, useRef } from 'react'
+import { Fragment, lazy, Suspense, useRef } from 'react'
 import { Button } from '../../ui/button'
-import { PadDock } from '../pad-dock'
 import { usePad } from '../use-pad'
 import { usePhone } from '../use-phone'
 import { useTypedEarly } from '../use-typed-early'
@@ -14,14 +13,21 @@ import { textAt, withText, type Measure } from './measure'
 import { addFlight, mostFlights } from './measure-edits'
 import { Measured } from './measured'
 import { partMarks } from './part-marks'
+import type { PlacedFault } from './placed-faults'
 import { RailCard } from './rail-card'
 import { CautionsBeside, SheetCard } from './sheet-card'
 import { FieldSheetContext } from './sheet-context'
 import { shownPaths } from './shown-paths'
 import type { HandrailState } from './use-handrail'
 
+/** Strip and pad come with the first row that is chosen on a phone. */
+const PadDock = lazy(async () => ({ default: (await import('../pad-dock')).PadDock }))
+
+/** The handrail at work, with its faults at the boxes of the sheet. */
+type FieldSheetInput = Omit<HandrailState, 'faults'> & { faults: readonly PlacedFault[] }
+
 /** The stair as it was measured, from the bottom up: reads like a field sheet. */
-export function FieldSheet({ state }: { state: HandrailState }) {
+export function FieldSheet({ state }: { state: FieldSheetInput }) {
   const { measure, store, faults, answer, stale, cautions, precision, rail } = state
   const form = useRef<HTMLFormElement>(null)
   const phone = usePhone()
@@ -60,14 +66,16 @@ export function FieldSheet({ state }: { state: HandrailState }) {
         </Button>
         <EndCard end="top" mark={marks.top} />
         <ExtrasCard />
-        {pad.open && (
-          <PadDock
-            pad={pad}
-            field={numberAt(measure, active)}
-            text={textAt(measure, active)}
-            precision={precision}
-            form={form}
-          />
+        {phone && pad.open && (
+          <Suspense fallback={null}>
+            <PadDock
+              pad={pad}
+              field={numberAt(measure, active)}
+              text={textAt(measure, active)}
+              precision={precision}
+              form={form}
+            />
+          </Suspense>
         )}
       </form>
     </FieldSheetContext>

@@ -1,7 +1,7 @@
 import { handrailFields } from '@/lib/calculators/field/handrail-fields'
 import type { Field, Fields } from '@/lib/calculators/fields'
 import { isNumber, type NumberField } from '../field-kinds'
-import { textAt, type Measure } from './measure'
+import { hasOneSize, textAt, type Measure } from './measure'
 
 const flightForm = { count: 0, rake: 1, tape: 2 } as const
 
@@ -12,8 +12,24 @@ function formOf(measure: Measure, path: string, { forms }: { forms: readonly Fie
   return forms[flightForm[way as keyof typeof flightForm] ?? flightForm.tape]
 }
 
-/** What the entry says of the input at a path: label, unit, hint. */
+/** What the one size of a section is called. */
+const sizeLabels: Readonly<Record<string, string>> = { round: 'Outside diameter', square: 'Side, outside' }
+
+/** What the sheet says of the input at a path: label, unit, hint. */
 export function fieldAt(measure: Measure, path: string): Field | undefined {
+  const field = entryFieldAt(measure, path)
+  const label =
+    path === 'section.depth' && hasOneSize(measure) ? sizeLabels[textAt(measure, 'section.shape')] : undefined
+  return field && label ? { ...field, label } : field
+}
+
+/** A sentence of the engine about the input at a path, in the sheet's own words for it. */
+export function inSheetWords(measure: Measure, path: string, message: string): string {
+  const [entry, sheet] = [entryFieldAt(measure, path), fieldAt(measure, path)]
+  return entry && sheet ? message.replace(entry.label, sheet.label) : message
+}
+
+function entryFieldAt(measure: Measure, path: string): Field | undefined {
   let at: Field | undefined
   let walked = ''
   for (const step of path.match(/\[\d+\]|[^.[\]]+/g) ?? []) {

@@ -11,9 +11,11 @@ import { LitProvider } from './lit'
 import { OriginBar } from './origin-bar'
 import { placedFaults } from './placed-faults'
 import { RailActions } from './rail-actions'
-import { RailPlate } from './rail-plate'
+import { RailPlateLater } from './later-drawings'
+import { useMadeAhead } from './use-made-ahead'
 import { RailResults } from './rail-results'
 import type { MeasureStore } from './measure-store'
+import { UndoLine } from './undo-line'
 import { pageStore, useHandrail, useKept } from './use-handrail'
 
 interface HandrailScreenProps {
@@ -33,7 +35,7 @@ export function HandrailScreen({ store = pageStore, ...rest }: HandrailScreenPro
   const kept = useKept(store)
   return (
     <LitProvider>
-      <OriginBar {...kept} store={store} />
+      <OriginBar kept={kept} store={store} />
       <Bench key={kept.sheet} store={store} {...rest} />
     </LitProvider>
   )
@@ -44,6 +46,7 @@ function Bench({ store, typeset, actions, aside, children }: HandrailScreenProps
   const { calculator, rail, answer, stale, precision, preferences, cautions } = state
   const faults = placedFaults(state.measure, state.faults)
   useLastUsed(calculator.id)
+  useMadeAhead(state.origin, preferences)
   const alone = cautions.filter(({ beside }) => beside === undefined)
   return (
     <>
@@ -52,12 +55,13 @@ function Bench({ store, typeset, actions, aside, children }: HandrailScreenProps
         <div className="rail-view">
           <div className="rail-head">
             {rail ? (
-              <RailPlate {...{ rail, precision, preferences, stale }} />
+              <RailPlateLater {...{ rail, precision, preferences, stale }} />
             ) : (
               <p className="rail-none">
                 Give the measures from the bottom of the stair up, and the rail is drawn here.
               </p>
             )}
+            <UndoLine kept={state} store={store} />
             <FaultSummary faults={faults} shown={rail !== null} />
           </div>
           <RailActions state={state} actions={actions} />

@@ -67,7 +67,9 @@ function ReturnLine({ piece, part, reading }: { piece: RailReturn; part?: RailPa
         long point <b className="line-number">{length(piece.longPoint)}</b>, short point {length(piece.shortPoint)},
         turns {piece.turns} to the wall going up
         <small>
-          45° in plan on the rail end, square at the wall; rolled with the rake by {piece.rolledWithRake.toFixed(2)}°;
+          45° in plan on the rail end, square at the wall;
+          {Math.abs(piece.rolledWithRake) >= 0.005 &&
+            ` rolled with the rake by ${piece.rolledWithRake.toFixed(2)}°;`}{' '}
           centre line {length(piece.centre)}; {piece.weld.toFixed(1)} in of weld around
         </small>
       </span>

@@ -8,7 +8,7 @@ export function LengthCell({ inches, reading }: { inches: number; reading: Readi
       <b className="cut-length">
         <Tape inches={inches} den={reading.precision.tape} units={reading.preferences.units} />
       </b>
-      <small>{inches.toFixed(3)}</small>
+      <small>{inches.toFixed(3)} in</small>
     </>
   )
 }

@@ -1,4 +1,4 @@
-import { noFlight, type Measure } from './measure'
+import { hasOneSize, noFlight, textAt, withText, type ExtraName, type Measure } from './measure'
 
 /** As many as the entry works at once. */
 export const mostFlights = 12
@@ -25,3 +25,20 @@ export function removeFlight(measure: Measure, index: number): Measure {
 
 /** The same rail on the other side of the stair: not one length changes. */
 export const mirrorHand = (measure: Measure): Measure => ({ ...measure, hand: measure.hand === 'L' ? 'R' : 'L' })
+
+/** What the code rows ask and the sheet knows already: nothing is written twice. */
+const knownAlready: Readonly<Record<string, (measure: Measure) => string | undefined>> = {
+  'code.outsideDia': (measure) => (hasOneSize(measure) ? measure.section.depth : undefined),
+  'code.wallClearance': ({ top, bottom }) => top.return.clearance ?? bottom.return.clearance,
+}
+
+/** An extra asked for, or no longer; what it held stays. */
+export function turnExtra(measure: Measure, name: ExtraName): Measure {
+  const on = measure[name].on === 'yes'
+  const turned = withText(measure, `${name}.on`, on ? '' : 'yes')
+  if (on || name !== 'code') return turned
+  return Object.entries(knownAlready).reduce(
+    (now, [path, known]) => (textAt(now, path) === '' ? withText(now, path, known(now) ?? '') : now),
+    turned,
+  )
+}

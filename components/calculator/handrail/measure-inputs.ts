@@ -1,8 +1,10 @@
+import { readQuantity } from '@/lib/trade/quantity/read'
 import type { RawInputs } from '../address'
 import { textOfRaw } from '../field-kinds'
 import { readList } from '../list-text'
 import {
   blankMeasure,
+  hasOneSize,
   type EndTexts,
   type Extra,
   type FlightTexts,
@@ -45,13 +47,18 @@ function bracketInputs(brackets: Extra) {
   return { ...given(brackets, ['jointClear']), field: readList(brackets.field ?? '') }
 }
 
+function sectionInputs(measure: Measure) {
+  const texts: Texts = given(measure.section, sectionKeys)
+  return hasOneSize(measure) && texts.depth ? { ...texts, width: texts.depth } : texts
+}
+
 /** What the engine is asked: of each flight the chosen way, of the extras those that are on. */
 export function inputsOf(measure: Measure): RawInputs {
-  const { hand, railHeight, section, flights, landings, bottom, top, brackets } = measure
+  const { hand, railHeight, flights, landings, bottom, top, brackets } = measure
   return {
     hand,
     railHeight,
-    section: given(section, sectionKeys),
+    section: sectionInputs(measure),
     flights: flights.map((flight) => chosen(flight, flightKeys[flight.way])),
     landings: landings.map((landing) => given(landing, landingKeys)),
     bottom: endInputs('bottom', bottom),
@@ -84,6 +91,18 @@ function endTexts(end: 'bottom' | 'top', value: unknown): EndTexts {
   }
 }
 
+function sameSize(one = '', other = ''): boolean {
+  const [a, b] = [readQuantity(one, 'in'), readQuantity(other, 'in')]
+  return one === other || ('value' in a && 'value' in b && a.value === b.value)
+}
+
+/** A round or square section of two sizes is neither: both sizes stay in sight as those of a rectangle. */
+function sectionTexts(value: unknown): Texts {
+  const { width, ...texts }: Texts = given(named(value), sectionKeys)
+  if (texts.shape === 'rect') return { ...texts, ...(width ? { width } : {}) }
+  return width === undefined || sameSize(texts.depth, width) ? texts : { ...texts, width, shape: 'rect' }
+}
+
 function bracketTexts(value: unknown): Extra {
   if (value === undefined || value === null) return blankMeasure.brackets
   const texts = named(value)
@@ -108,7 +127,7 @@ export function measureFromInputs(inputs: RawInputs): Measure {
     ...blankMeasure,
     hand: textOfRaw(inputs.hand) || blankMeasure.hand,
     railHeight: textOfRaw(inputs.railHeight),
-    section: { ...blankMeasure.section, ...given(named(inputs.section), sectionKeys) },
+    section: { ...blankMeasure.section, ...sectionTexts(inputs.section) },
     flights: whole,
     landings: whole.slice(1).map((_, i) => landings[i] ?? {}),
     bottom: endTexts('bottom', inputs.bottom),

@@ -1,39 +1,31 @@
-import { measureParameter, measureQuery, readMeasure, writeMeasure } from './measure-address'
+import { measureParameter, measureQuery, readMeasure } from './measure-address'
+import { isBlank, keepDraft, readDrafts, sameMeasure, type Drafts } from './measure-drafts'
 import type { Measure } from './measure'
 
 /** Where the numbers on the sheet came from. */
 export type Origin = 'example' | 'own'
 
-export interface Kept {
+/** A sheet as it stands. */
+interface Standing {
   measure: Measure
   origin: Origin
-  /** What the last great change took away, to be brought back, and what to call it. */
-  undo: { measure: Measure; origin: Origin; sheet: number; says: string } | null
   /** Counts sheets begun anew: numbers of the one before have no place on the next. */
   sheet: number
+  /** Another measure of this reader, which this one took the place of. */
+  earlier: Measure | null
+}
+
+export interface Kept extends Standing {
+  /** The sheet before the last great change, to be brought back; the one that came of it; and what to call it. */
+  undo: { before: Standing; after: Measure; says: string } | null
 }
 
 /** Browsers refuse an address that changes at every keystroke; the sheet follows at once, address and draft a moment later. */
 const settleMs = 250
-const draftKey = 'longpoint.handrail-draft'
-
-/** A device that keeps nothing holds the measure in the address only. */
-function draft(): string | null {
-  try {
-    return localStorage.getItem(draftKey)
-  } catch {
-    return null
-  }
-}
-function keepDraft(text: string): void {
-  try {
-    localStorage.setItem(draftKey, text)
-  } catch {
-    // Nothing is lost while the page stands: the address has it all.
-  }
-}
 
 export interface MeasureStore {
+  /** True for a sheet that is kept in a job, and not on this device. */
+  readonly saved: boolean
   now: () => Kept
   atFirst: () => Kept
   subscribe: (listener: () => void) => () => void
@@ -41,8 +33,11 @@ export interface MeasureStore {
   type: (change: (measure: Measure) => Measure) => void
   /** A change that can be taken back as a whole. */
   replace: (measure: Measure, says: string) => void
-  /** An empty sheet, or another one as a whole; can be taken back too. */
+  /** An empty sheet, or another one as a whole; can be taken back too, and what stood there is kept as the earlier one. */
   begin: (measure: Measure, says: string) => void
+  /** The example in place of the sheet. */
+  showExample: () => void
+  /** Takes the last great change back, and can itself be taken back. */
   undo: () => void
 }
 
@@ -59,23 +54,31 @@ function addressOf(measure: Measure): string {
  * A sheet that was `saved` starts from what was kept, and leaves the draft alone.
  */
 export function measureStore(start: Measure, saved = false): MeasureStore {
-  const first: Kept = { measure: start, origin: saved ? 'own' : 'example', undo: null, sheet: 0 }
+  const first: Kept = { measure: start, origin: saved ? 'own' : 'example', undo: null, earlier: null, sheet: 0 }
   const listeners = new Set<() => void>()
   let kept: Kept | null = null
   let timer: ReturnType<typeof setTimeout> | undefined
   let unsettled = false
 
   function opened(): Kept {
-    const found =
-      readMeasure(new URLSearchParams(location.search).get(measureParameter)) ?? (saved ? null : readMeasure(draft()))
-    if (!found) return first
-    const origin = !saved && writeMeasure(found) === writeMeasure(start) ? 'example' : 'own'
+    const drafts: Drafts = saved ? { now: null, before: null } : readDrafts()
+    const found = readMeasure(new URLSearchParams(location.search).get(measureParameter)) ?? drafts.now
+    const measure = found ?? start
+    const worth = (one: Measure | null) => one !== null && !isBlank(one) && !sameMeasure(one, measure)
+    const earlier = [drafts.now, drafts.before].find(worth) ?? null
+    if (!found) return { ...first, earlier }
+    const origin = !saved && sameMeasure(found, start) ? 'example' : 'own'
     // The page was made ahead with the example: its rail is none of this sheet's.
-    return { measure: found, origin, undo: null, sheet: origin === 'own' ? 1 : 0 }
+    return { measure: found, origin, undo: null, earlier, sheet: origin === 'own' ? 1 : 0 }
   }
   const now = () => (kept ??= opened())
-  const keep = ({ origin, measure }: Kept) => {
-    if (!saved) keepDraft(origin === 'example' ? '' : writeMeasure(measure))
+  function keep({ origin, measure, earlier }: Kept): void {
+    if (saved) return
+    const draft = readDrafts().now
+    if (origin === 'own') keepDraft('now', measure)
+    // Back from a cleared sheet to the example: the empty one is not worth keeping.
+    else if (draft && isBlank(draft)) keepDraft('now', null)
+    if (earlier) keepDraft('before', earlier)
   }
   function settle(): void {
     clearTimeout(timer)
@@ -91,9 +94,17 @@ export function measureStore(start: Measure, saved = false): MeasureStore {
     timer = setTimeout(settle, settleMs)
     for (const listener of listeners) listener()
   }
-  const before = (says: string): Kept['undo'] => {
-    const { measure, origin, sheet } = now()
-    return { measure, origin, sheet, says }
+  const standing = (): Standing => {
+    const { measure, origin, sheet, earlier } = now()
+    return { measure, origin, sheet, earlier }
+  }
+  function changeGreatly(next: Standing, says: string): void {
+    change({ ...next, undo: { before: standing(), after: next.measure, says } })
+  }
+  function begin(measure: Measure, origin: Origin, says: string): void {
+    const { measure: left, origin: leftOrigin, sheet, earlier } = now()
+    const own = leftOrigin === 'own' && !isBlank(left) ? left : earlier
+    changeGreatly({ measure, origin, sheet: sheet + 1, earlier: own && !sameMeasure(own, measure) ? own : null }, says)
   }
   function moved(): void {
     kept = null
@@ -102,6 +113,7 @@ export function measureStore(start: Measure, saved = false): MeasureStore {
   }
 
   return {
+    saved,
     now,
     atFirst: () => first,
     subscribe(listener) {
@@ -124,11 +136,12 @@ export function measureStore(start: Measure, saved = false): MeasureStore {
       }
     },
     type: (edit) => change({ ...now(), measure: edit(now().measure), origin: 'own' }),
-    replace: (measure, says) => change({ measure, origin: 'own', undo: before(says), sheet: now().sheet }),
-    begin: (measure, says) => change({ measure, origin: 'own', undo: before(says), sheet: now().sheet + 1 }),
+    replace: (measure, says) => changeGreatly({ ...standing(), measure, origin: 'own' }, says),
+    begin: (measure, says) => begin(measure, 'own', says),
+    showExample: () => begin(start, 'example', 'The example stands on the sheet.'),
     undo() {
       const { undo } = now()
-      if (undo) change({ measure: undo.measure, origin: undo.origin, sheet: undo.sheet, undo: null })
+      if (undo) changeGreatly(undo.before, 'Brought back as it was.')
     },
   }
 }

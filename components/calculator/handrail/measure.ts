@@ -47,6 +47,9 @@ function placed(tree: Tree | undefined, [step, ...rest]: readonly string[], text
   return { ...branch, [step]: placed(branch[step], rest, text) }
 }
 
+/** Round and square stock has one size: it is asked for once. */
+export const hasOneSize = ({ section }: Pick<Measure, 'section'>): boolean => section.shape !== 'rect'
+
 export const noFlight: FlightTexts = { way: 'tape' }
 const noExtra: Extra = { on: '' }
 

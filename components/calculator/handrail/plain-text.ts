@@ -5,7 +5,7 @@ import { closingText } from './closing-text'
 import { endText } from './end-cut'
 import { sectionText } from './parts-table'
 import type { Reading } from './reading-of'
-import { sticksText } from './sticks'
+import { sticksText } from './sticks-text'
 import type { Rail } from './use-handrail'
 
 /** A cut list to send as a message: what to cut, where the brackets go, what to mind, where to find it again. */

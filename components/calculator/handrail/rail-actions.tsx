@@ -3,6 +3,7 @@
 import { lazy, Suspense, useState, type ReactNode } from 'react'
 import { Button, ButtonLink } from '../../ui/button'
 import { measureQuery } from './measure-address'
+import { mirrorHand } from './measure-edits'
 import { cutListText } from './plain-text'
 import type { HandrailState } from './use-handrail'
 
@@ -17,7 +18,7 @@ interface RailActionsProps {
 
 /** Print the cut sheet, keep it in a job, copy it as text. Numbers left from before are not handed on. */
 export function RailActions({ state, actions }: RailActionsProps) {
-  const { raw, rail, stale, measure, precision, preferences, origin } = state
+  const { store, raw, rail, stale, measure, precision, preferences, origin } = state
   const [said, setSaid] = useState('')
   const copy = async () => {
     if (!rail) return
@@ -43,6 +44,12 @@ export function RailActions({ state, actions }: RailActionsProps) {
       </ButtonLink>
       <Button variant="quiet" onClick={() => void copy()}>
         Copy as text
+      </Button>
+      <Button
+        variant="quiet"
+        onClick={() => store.replace(mirrorHand(measure), 'The hand is mirrored; not one length changes.')}
+      >
+        Mirror the hand
       </Button>
       <p role="status" className="basis-full text-mute empty:hidden">
         {said}

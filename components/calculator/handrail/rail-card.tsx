@@ -1,10 +1,8 @@
 'use client'
 
-import { Button } from '../../ui/button'
 import { ChoiceField } from '../../ui/choice-field'
 import { fieldAt } from './fields-at'
-import { withText } from './measure'
-import { mirrorHand } from './measure-edits'
+import { hasOneSize, withText } from './measure'
 import { Measured } from './measured'
 import { SheetCard } from './sheet-card'
 import { useFieldSheet } from './sheet-context'
@@ -25,14 +23,11 @@ export function RailCard() {
         onChange={(text) => store.type((now) => withText(now, 'hand', text))}
         hint={hand?.hint}
       />
-      <Button className="mirror" onClick={() => store.replace(mirrorHand(measure), 'The hand is mirrored.')}>
-        Mirror the hand
-      </Button>
       <Measured path="railHeight" />
       <Measured path="section.shape" />
       <div className="measure-pair">
         <Measured path="section.depth" />
-        <Measured path="section.width" />
+        {!hasOneSize(measure) && <Measured path="section.width" />}
       </div>
     </SheetCard>
   )

@@ -1,16 +1,16 @@
 import { createContext, use } from 'react'
 import type { Caution, Note, Values } from '@/lib/calculators/define'
 import type { Precision } from '@/lib/calculators/fields'
-import type { Fault } from '@/lib/calculators/read'
 import type { PadState } from '../use-pad'
 import type { Measure } from './measure'
 import type { MeasureStore } from './measure-store'
+import type { PlacedFault } from './placed-faults'
 
 /** What every part of the field sheet works with. */
 export interface FieldSheetState {
   measure: Measure
   store: MeasureStore
-  faults: readonly Fault[]
+  faults: readonly PlacedFault[]
   notes: readonly Note[]
   cautions: readonly Caution<Values, Values>[]
   pad: PadState

@@ -1,4 +1,4 @@
-import type { Measure } from './measure'
+import { hasOneSize, type Measure } from './measure'
 import { bracketKeys, endAsks, flightKeys, landingKeys, plainExtraKeys, plainExtras, returnKeys } from './measure-keys'
 
 function endPaths(measure: Measure, end: 'bottom' | 'top'): string[] {
@@ -16,7 +16,7 @@ export function shownPaths(measure: Measure): string[] {
   return [
     'railHeight',
     'section.depth',
-    'section.width',
+    ...(hasOneSize(measure) ? [] : ['section.width']),
     ...endPaths(measure, 'bottom'),
     ...flights.flatMap((flight, i) => [
       ...(i > 0 ? landingKeys.map((key) => `landings[${i - 1}].${key}`) : []),

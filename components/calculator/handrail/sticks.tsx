@@ -8,31 +8,11 @@ import { Plate } from '../../drawing/plate'
 import { Tape } from '../../ui/tape'
 import { useLit } from './lit'
 import type { Reading } from './reading-of'
+import { sticksText } from './sticks-text'
 import type { Rail } from './use-handrail'
 
-/** How many sticks, and whether fewer could do. */
-export function sticksText({ sticks, bound, proved }: Pick<RailSticks, 'sticks' | 'bound' | 'proved'>): string {
-  const many = `${sticks} ${sticks === 1 ? 'stick' : 'sticks'}`
-  return proved ? `${many}, and no fewer can do` : `${many}; ${bound} not ruled out`
-}
-
-/** The sticks to buy with the parts laid in them. */
-export function Sticks({ rail, reading }: { rail: Rail; reading: Reading }) {
-  const { stock } = rail.solved
-  if (!rail.given.stock || stock === undefined) return null
-  return (
-    <section aria-labelledby="sticks">
-      <h2 id="sticks">Sticks</h2>
-      {stock ? (
-        <LaidSticks stock={stock} rail={rail} reading={reading} />
-      ) : (
-        <p>A part is longer than the stick: the remarks name it.</p>
-      )}
-    </section>
-  )
-}
-
-function LaidSticks({ stock, rail, reading }: { stock: RailSticks; rail: Rail; reading: Reading }) {
+/** The bars to scale with the parts laid in them, and what drops off. */
+export function LaidSticks({ stock, rail, reading }: { stock: RailSticks; rail: Rail; reading: Reading }) {
   const { lit, light } = useLit()
   const { precision, preferences } = reading
   const { given, solved } = rail
