@@ -11,6 +11,7 @@ import { LitProvider } from './lit'
 import { OriginBar } from './origin-bar'
 import { placedFaults } from './placed-faults'
 import { RailActions } from './rail-actions'
+import { RailBeingOff } from './rail-being-off'
 import { RailPlateLater } from './later-drawings'
 import { useMadeAhead } from './use-made-ahead'
 import { RailResults } from './rail-results'
@@ -76,6 +77,7 @@ function Bench({ store, typeset, actions, aside, children }: HandrailScreenProps
       <div className="below">
         <div className="below-main">
           {answer && <Working calculator={calculator} steps={answer.steps} stale={stale} typeset={typeset} />}
+          {rail && !stale && <RailBeingOff {...{ rail, precision }} measure={state.measure} />}
           {children}
         </div>
         <div className="below-side">{aside}</div>

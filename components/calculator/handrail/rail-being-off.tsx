@@ -26,15 +26,18 @@ interface RailBeingOffProps {
 export function RailBeingOff({ rail, measure, precision }: RailBeingOffProps) {
   const given = useDeferredValue(rail.given)
   const slips = useMemo(() => railSlips(given, precision).slice(0, told), [given, precision])
-  if (slips.length === 0) return null
+  const lines = slips.flatMap(({ path, ...slip }) => {
+    const label = fieldAt(measure, path)?.label.toLowerCase()
+    return label === undefined ? [] : [{ ...slip, path, name: `${placeOf(path)}, ${label}` }]
+  })
+  if (lines.length === 0) return null
   return (
     <section aria-labelledby="being-off">
       <h2 id="being-off">Being off</h2>
       <ul className="being-off">
-        {slips.map(({ path, off, length, cut }) => (
+        {lines.map(({ path, name, off, length, cut }) => (
           <li key={path}>
-            {placeOf(path)}, {fieldAt(measure, path)?.label.toLowerCase() ?? path}: {offWords[off]} moves a part by{' '}
-            {length.toFixed(3)} in and a cut by {cut.toFixed(2)}°.
+            {name}: {offWords[off]} moves a part by {length.toFixed(3)} in and a cut by {cut.toFixed(2)}°.
           </li>
         ))}
       </ul>
