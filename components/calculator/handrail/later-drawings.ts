@@ -1,3 +1,5 @@
+// The look of a drawing is needed from the first paint on, what draws it later.
+import '../../drawing/plate.module.css'
 import { drawnLater } from './drawn-later'
 
 export const RailPlateLater = drawnLater(async () => (await import('./rail-plate')).RailPlate)
