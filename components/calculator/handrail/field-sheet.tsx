@@ -1,6 +1,7 @@
 'use client'
 
 import { Fragment, lazy, Suspense, useRef } from 'react'
+import { flushSync } from 'react-dom'
 import { Button } from '../../ui/button'
 import { usePad } from '../use-pad'
 import { usePhone } from '../use-phone'
@@ -11,7 +12,7 @@ import { numberAt } from './fields-at'
 import { FlightCard } from './flight-card'
 import { textAt, withText, type Measure } from './measure'
 import { addFlight, mostFlights } from './measure-edits'
-import { Measured } from './measured'
+import { boxId, Measured } from './measured'
 import { partMarks } from './part-marks'
 import type { PlacedFault } from './placed-faults'
 import { RailCard } from './rail-card'
@@ -43,6 +44,11 @@ export function FieldSheet({ state }: { state: FieldSheetInput }) {
   const notes = stale ? [] : (answer?.warnings ?? [])
   const marks = partMarks(rail?.solved.parts ?? [])
   const active = pad.active ?? ''
+  const add = () => {
+    flushSync(() => store.replace(addFlight(measure), 'A landing and a flight are added.'))
+    // The new cards push this button down: the hand goes to the first of their boxes.
+    document.getElementById(boxId(`landings[${measure.landings.length}].length`))?.focus()
+  }
   return (
     <FieldSheetContext value={{ measure, store, faults, notes, cautions, pad, phone, precision }}>
       <form ref={form} className="field-sheet" aria-label="Field sheet" onSubmit={(event) => event.preventDefault()}>
@@ -60,7 +66,7 @@ export function FieldSheet({ state }: { state: FieldSheetInput }) {
         ))}
         <Button
           disabled={measure.flights.length >= mostFlights}
-          onClick={() => store.replace(addFlight(measure), 'A landing and a flight are added.')}
+          onClick={add}
         >
           Add a flight
         </Button>

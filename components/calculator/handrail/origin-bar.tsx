@@ -2,6 +2,7 @@
 
 import { Button } from '../../ui/button'
 import { blankMeasure } from './measure'
+import { isBlank } from './measure-drafts'
 import type { Kept, MeasureStore } from './measure-store'
 
 /** True while nothing was typed since the last great change: its own line beside the drawing takes it back. */
@@ -12,7 +13,7 @@ const saved = 'A saved measure. What you change stays in the address until you s
 
 /** Says whose numbers stand on the sheet, and offers the other sheets that there are. */
 export function OriginBar({ kept, store }: { kept: Kept; store: MeasureStore }) {
-  const { origin, undo, earlier } = kept
+  const { measure, origin, undo, earlier } = kept
   const example = origin === 'example'
   const clear = () => store.begin(blankMeasure, 'The sheet is cleared.')
   return (
@@ -39,9 +40,11 @@ export function OriginBar({ kept, store }: { kept: Kept; store: MeasureStore }) 
           See the example
         </Button>
       )}
-      <Button variant={example ? 'primary' : 'quiet'} onClick={clear}>
-        {example ? 'Clear it and put in your own' : 'Clear the sheet'}
-      </Button>
+      {!isBlank(measure) && (
+        <Button variant={example ? 'primary' : 'quiet'} onClick={clear}>
+          {example ? 'Clear it and put in your own' : 'Clear the sheet'}
+        </Button>
+      )}
     </div>
   )
 }

@@ -30,7 +30,7 @@ export function RailActions({ state, actions }: RailActionsProps) {
       setSaid('This device does not let a page copy. Select the numbers and copy them by hand.')
     }
   }
-  if (stale || !rail) return <p className="rail-actions-wait">Mend the measures, then print, save or copy.</p>
+  if (stale || !rail) return <p className="rail-actions-wait">Print, save and copy stand here as soon as the measures are whole.</p>
   return (
     <div className="actions rail-actions no-print">
       {actions ??
