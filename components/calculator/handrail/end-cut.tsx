@@ -1,26 +1,9 @@
 'use client'
 
 import type { Preferences } from '@/lib/schemas/account'
-import { showDial } from '@/lib/trade/quantity/dial'
 import type { PartEnd } from '@/lib/trade/rail/types'
+import { faceWords, sawReading } from '@/lib/trade/rail/words'
 import { Dial } from '../../ui/tape'
-
-export const faceWords: Readonly<Record<PartEnd['longPoint'], string>> = {
-  top: 'long on top',
-  underside: 'long underneath',
-  square: 'square',
-  'room side (plan)': 'long on the room side, cut in plan',
-}
-
-/** What the saw reads for an angle off square, by what this reader's saw calls square. */
-export const sawReading = (offSquare: number, { sawSquare }: Pick<Preferences, 'sawSquare'>) =>
-  sawSquare === 90 ? 90 - offSquare : offSquare
-
-/** One end's cut in words: `saw 16 1/4°, long on top`. */
-export function endText(end: PartEnd, step: number, preferences: Pick<Preferences, 'sawSquare'>): string {
-  if (end.longPoint === 'square') return 'square'
-  return `saw ${showDial(sawReading(end.saw, preferences), step)}, ${faceWords[end.longPoint]}`
-}
 
 /** Triangle at the long point: down where it lies on top, up where it lies underneath, as in the drawing. */
 function FaceSign({ face }: { face: PartEnd['longPoint'] }) {
@@ -44,12 +27,12 @@ export function EndCut({ end, step, preferences }: EndCutProps) {
   return (
     <>
       <b className="cut-saw">
-        <Dial deg={sawReading(end.saw, preferences)} step={step} />
+        <Dial deg={sawReading(end.saw, preferences.sawSquare)} step={step} />
       </b>
       <span className={end.longPoint === 'room side (plan)' ? 'cut-face cut-face-plan' : 'cut-face'}>
         <FaceSign face={end.longPoint} /> {faceWords[end.longPoint]}
       </span>
-      <small>exactly {Number(sawReading(end.exact, preferences).toFixed(2))}°</small>
+      <small>exactly {Number(sawReading(end.exact, preferences.sawSquare).toFixed(2))}°</small>
     </>
   )
 }

@@ -1,26 +1,13 @@
 'use client'
 
-import { showTape } from '@/lib/trade/quantity/tape'
 import type { RailPart, Section } from '@/lib/trade/rail/types'
+import { sectionText, slopeText } from '@/lib/trade/rail/words'
 import { EndCut } from './end-cut'
 import { LengthCell } from './length-cell'
 import { PartMark, usePartLight } from './lit'
 import type { Reading } from './reading-of'
 
 const heads = ['Part', 'Top edge', 'Underside', 'Blank, tip to tip', 'Low end', 'High end', 'Between cuts'] as const
-
-const shapeWords = { round: 'round', square: 'square', rect: 'rectangular' } as const
-
-/** The section as it is ordered: 1.66 in round, 2 in × 1 in rectangular. */
-export function sectionText({ shape, depth, width }: Section, den: number): string {
-  const size = (inches: number) =>
-    Math.abs(inches * den - Math.round(inches * den)) < 1e-6 ? showTape(inches, den) : `${Number(inches.toFixed(3))} in`
-  return depth === width
-    ? `${size(depth)} ${shapeWords[shape]}`
-    : `${size(depth)} × ${size(width)} ${shapeWords[shape]}`
-}
-
-const slopeText = (slope: number) => `${slope < 0 ? '−' : ''}${Number(Math.abs(slope).toFixed(2))}°`
 
 interface PartsTableProps {
   parts: readonly RailPart[]

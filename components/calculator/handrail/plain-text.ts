@@ -1,11 +1,8 @@
 import { showDial } from '@/lib/trade/quantity/dial'
 import { showTape } from '@/lib/trade/quantity/tape'
 import type { HandrailOutputs, RailPart } from '@/lib/trade/rail/types'
-import { closingText } from './closing-text'
-import { endText } from './end-cut'
-import { sectionText } from './parts-table'
+import { closingText, endText, sectionText, sticksText } from '@/lib/trade/rail/words'
 import type { Reading } from './reading-of'
-import { sticksText } from './sticks-text'
 import type { Rail } from './use-handrail'
 
 /** A cut list to send as a message: what to cut, where the brackets go, what to mind, where to find it again. */
@@ -41,7 +38,7 @@ function partLines(part: RailPart, { precision: { tape, dial }, preferences }: R
   return [
     `${part.mark}  ${part.kind}`,
     `   top edge ${showTape(part.topEdge, tape)}, underside ${showTape(part.underside, tape)}, blank ${showTape(part.overall, tape)}`,
-    `   low end ${endText(part.endA, dial, preferences)}; high end ${endText(part.endB, dial, preferences)}`,
+    `   low end ${endText(part.endA, dial, preferences.sawSquare)}; high end ${endText(part.endB, dial, preferences.sawSquare)}`,
     `   ${[part.cuts, part.turn, part.note].filter(Boolean).join('; ')}`,
   ]
 }

@@ -3,12 +3,12 @@
 import { useCallback } from 'react'
 import type { Show } from '@/lib/drawing/sketch'
 import type { HandrailOutputs, RailSticks } from '@/lib/trade/rail/types'
+import { sticksText } from '@/lib/trade/rail/words'
 import { drawSticks } from '../../drawing/handrail-sticks'
 import { Plate } from '../../drawing/plate'
 import { Tape } from '../../ui/tape'
 import { useLit } from './lit'
 import type { Reading } from './reading-of'
-import { sticksText } from './sticks-text'
 import type { Rail } from './use-handrail'
 
 /** The bars to scale with the parts laid in them, and what drops off. */
