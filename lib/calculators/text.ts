@@ -6,7 +6,8 @@ import type { Output, OutputValue, Outputs } from './outputs'
 
 export type Text = string | null | Text[] | { [name: string]: Text }
 
-const suffix: Partial<Record<OutputValue['unit'], string>> = {
+/** What stands behind a number of each unit. */
+export const unitSuffix: Readonly<Partial<Record<OutputValue['unit'], string>>> = {
   deg: '°',
   in: ' in',
   'in/12': ' in in 12',
@@ -52,5 +53,5 @@ export function valueText(output: OutputValue, value: unknown, precision: Precis
   if (output.round === 'tape') return showTape(value, precision.tape)
   if (output.round === 'dial') return showDial(value, precision.dial)
   const digits = output.round === 'exact' ? String(value) : value.toFixed(output.round.decimals)
-  return `${digits.replace(/^-(0(?:\.0*)?)$/, '$1')}${suffix[output.unit] ?? ''}`
+  return `${digits.replace(/^-(0(?:\.0*)?)$/, '$1')}${unitSuffix[output.unit] ?? ''}`
 }
