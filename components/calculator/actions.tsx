@@ -5,6 +5,7 @@ import type { Answer } from '@/lib/calculators/answer'
 import type { AnyCalculator } from '@/lib/calculators/define'
 import type { Precision } from '@/lib/calculators/fields'
 import { Button, ButtonLink } from '../ui/button'
+import { usePreferences } from '../ui/use-preferences'
 import { writeAddress, type RawInputs } from './address'
 import { answerText } from './answer-text'
 import { openSheet } from './print-sheet'
@@ -21,10 +22,11 @@ interface CalculatorActionsProps {
 export function CalculatorActions({ calculator, raw, answer, precision }: CalculatorActionsProps) {
   const [said, setSaid] = useState('')
   const { id, inputs } = calculator
+  const { units, sawSquare } = usePreferences()
   const query = writeAddress(inputs, raw)
   const print = async () => {
     setSaid('Drawing the sheet…')
-    if (await openSheet(id, raw, precision)) return setSaid('')
+    if (await openSheet(id, { inputs: raw, precision, units, sawSquare })) return setSaid('')
     setSaid('The sheet did not come; printing this page instead.')
     window.print()
   }

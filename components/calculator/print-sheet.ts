@@ -1,13 +1,12 @@
-import type { Precision } from '@/lib/calculators/fields'
-import type { RawInputs } from './address'
+import type { SheetAsk } from '@/lib/schemas/sheet'
 
 /** Fetches the printable sheet of these inputs and opens it. False when it did not come. */
-export async function openSheet(id: string, inputs: RawInputs, precision: Precision): Promise<boolean> {
+export async function openSheet(id: string, ask: SheetAsk): Promise<boolean> {
   try {
     const response = await fetch(`/api/calculators/${id}/sheet`, {
       method: 'POST',
       headers: { 'content-type': 'application/json' },
-      body: JSON.stringify({ inputs, precision }),
+      body: JSON.stringify(ask),
     })
     if (!response.ok) return false
     const url = URL.createObjectURL(await response.blob())
