@@ -8,7 +8,7 @@ export function Pieces({ line, reading }: { line: Line; reading: SheetReading })
 }
 
 function OnePiece({ piece, reading: { precision, preferences } }: { piece: Piece; reading: SheetReading }) {
-  if (typeof piece === 'string') return piece
+  if (typeof piece === 'string') return <span className="printed-word">{piece}</span>
   if ('strong' in piece) return <b>{piece.strong}</b>
   if ('tape' in piece)
     return (

@@ -8,8 +8,8 @@ export function SheetLists({ lists, reading }: { lists: readonly List[]; reading
     <div className="printed-lists">
       {lists.map((list) => (
         <section key={list.title}>
-          <h3>{list.title}</h3>
           {list.symbol && <WeldSymbol />}
+          <h3>{list.title}</h3>
           <dl>
             {list.rows.map(({ name, line, under }, i) => (
               <div key={i}>

@@ -1,3 +1,4 @@
+import { pictureRoom, pictureViewport, stripViewport } from '@/lib/print/sheet/picture-room'
 import type { Block, Sheet, SheetReading } from '@/lib/print/sheet/sheet'
 import { PaperPlate } from './paper-plate'
 import { Pieces } from './pieces'
@@ -9,7 +10,7 @@ import './sheet.css'
 /** A sheet as it leaves the printer: black on white in every theme, one page; on a phone it reads down. */
 export function SheetPaper({ sheet }: { sheet: Sheet }) {
   const { supersededBy, facts, blocks, reading } = sheet
-  const rows = blocks.reduce((sum, block) => sum + (block.kind === 'table' ? block.rows.length : 0), 0)
+  const room = pictureRoom(sheet)
   return (
     <article className="printed" aria-label="Sheet" data-superseded={supersededBy ?? undefined}>
       {supersededBy !== undefined && (
@@ -31,7 +32,7 @@ export function SheetPaper({ sheet }: { sheet: Sheet }) {
         ))}
       </ul>
       {blocks.map((block, i) => (
-        <SheetBlock key={i} block={block} reading={reading} rows={rows} />
+        <SheetBlock key={i} block={block} reading={reading} room={room} />
       ))}
       <SheetFoot sheet={sheet} />
     </article>
@@ -51,37 +52,25 @@ function SheetTop({ sheet: { title, under, particulars, hand, reading } }: { she
             <Pieces line={line} reading={reading} />
           </p>
         ))}
-      </div>
-      {hand && (
-        <p className="printed-hand">
-          <b>{hand}</b>
-          <span>
+        {hand && (
+          <p className="printed-going">
             hand, going UP <i aria-hidden="true" className="printed-up" />
-          </span>
-        </p>
-      )}
+          </p>
+        )}
+      </div>
+      {hand && <b className="printed-hand">{hand}</b>}
     </header>
   )
 }
 
-/** The picture gives way to long tables, so that the whole stays on one page. */
-const pictureHeight = (rows: number) => Math.max(190, 400 - 34 * Math.max(0, rows - 4))
-
-function SheetBlock({ block, reading, rows }: { block: Block; reading: SheetReading; rows: number }) {
+function SheetBlock({ block, reading, room }: { block: Block; reading: SheetReading; room: number }) {
   switch (block.kind) {
     case 'picture': {
-      const strip = block.as === 'strip'
-      const viewport = {
-        width: 720,
-        height: strip ? 160 : pictureHeight(rows),
-        textScale: 0.8,
-        lineScale: 0.75,
-        margin: 8,
-      }
+      const viewport = block.as === 'strip' ? stripViewport : pictureViewport(room)
       return (
         <figure className="printed-picture">
           {block.says && <figcaption>{block.says}</figcaption>}
-          <PaperPlate sketch={block.sketch} title={block.title} viewport={{ ...viewport, trim: strip }} />
+          <PaperPlate sketch={block.sketch} title={block.title} viewport={viewport} />
         </figure>
       )
     }

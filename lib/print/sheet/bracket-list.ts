@@ -6,19 +6,31 @@ type AnyBracket = SpacedBrackets | FieldBracket | BracketOffRail
 /** Running marks for the brackets, each part from its own low end on the underside. */
 export function bracketList(brackets: HandrailOutputs['brackets']): List | null {
   if (!brackets || brackets.length === 0) return null
+  const all: readonly AnyBracket[] = brackets
+  const spaced = all.filter((bracket): bracket is SpacedBrackets => !('n' in bracket))
+  const off = all.filter((bracket): bracket is BracketOffRail => 'off' in bracket)
+  const field = all.filter((bracket): bracket is FieldBracket => 'n' in bracket && !('off' in bracket))
+  const parts = [...new Set(field.map(({ part }) => part))]
   return {
     title: 'Bracket centres on the underside, running from the low end',
-    rows: (brackets as AnyBracket[]).map(rowOf),
+    rows: [
+      ...spaced.map(({ part, alongUndersideFromLowEnd }) => ({ name: part, line: running(alongUndersideFromLowEnd) })),
+      ...parts.map((name) => ({ name, line: numbered(field.filter(({ part }) => part === name)) })),
+      ...(off.length > 0 ? [{ name: 'Off', line: [`beyond the rail: ${off.map(({ n }) => n).join(', ')}`] }] : []),
+    ],
   }
 }
 
-function rowOf(bracket: AnyBracket): List['rows'][number] {
-  if ('off' in bracket) return { name: String(bracket.n), line: ['beyond the rail'] }
-  if ('n' in bracket) {
-    const close = bracket.tooCloseToJoint ? [' too close to a joint'] : []
-    return { name: `${bracket.n} on ${bracket.part}`, line: [{ tape: bracket.alongUndersideFromLowEnd }, ...close] }
-  }
-  return { name: bracket.part, line: running(bracket.alongUndersideFromLowEnd) }
-}
+const parted = (lines: readonly Line[]): Line => lines.flatMap((line, i) => (i > 0 ? [' · ', ...line] : line))
 
-const running = (marks: readonly number[]): Line => marks.flatMap((tape, i) => (i > 0 ? [' · ', { tape }] : [{ tape }]))
+const running = (marks: readonly number[]): Line => parted(marks.map((tape) => [{ tape }]))
+
+/** Brackets taped on the stair keep the numbers they were given. */
+const numbered = (brackets: readonly FieldBracket[]): Line =>
+  parted(
+    brackets.map(({ n, alongUndersideFromLowEnd, tooCloseToJoint }) => [
+      `${n}: `,
+      { tape: alongUndersideFromLowEnd },
+      ...(tooCloseToJoint ? [{ strong: ' too close to a joint' }] : []),
+    ]),
+  )

@@ -1,7 +1,6 @@
-import { showTape } from '@/lib/trade/quantity/tape'
 import type { Sketch } from '@/lib/drawing/sketch'
 import type { HandrailInputs, HandrailOutputs } from '@/lib/trade/rail/types'
-import { closingText, sectionText, sticksText } from '@/lib/trade/rail/words'
+import { closingText, heightText, sectionText, sticksText } from '@/lib/trade/rail/words'
 import { bracketList } from './bracket-list'
 import { jointList } from './joint-list'
 import { partsTable } from './parts-table'
@@ -33,15 +32,16 @@ export interface CutSheetParts {
 /** The cut sheet of a whole rail: everything the saw, the bench and the site need of it. */
 export function cutSheetOf({ head, given, solved, elevation, sticks, reading, address }: CutSheetParts): Sheet {
   const { tape } = reading.precision
+  const height = heightText(given.railHeight, tape, reading.preferences.units)
   return {
     title: head.job || 'Handrail',
     under: underTitle(head) || 'Cut sheet, not kept in a job',
-    particulars: [...particularsOf(head), ...solved.closing.map((closing): Line => [closingLine(closing, tape)])],
+    particulars: [...particularsOf(head), ...closingLines(solved.closing, tape)],
     hand: solved.hand,
     ...(head.kept?.supersededBy === undefined ? {} : { supersededBy: head.kept.supersededBy }),
     facts: [
       ['Rail ', { strong: sectionText(given.section, tape) }],
-      ['Height ', { tape: given.railHeight }, ' to top'],
+      ['Height ', { strong: height }, ' to top'],
       ['Saw ', { strong: `${reading.preferences.sawSquare} = square` }],
       ['Checked by ', blankRule(11), { strong: ' blank = DO NOT CUT' }],
     ],
@@ -52,14 +52,19 @@ export function cutSheetOf({ head, given, solved, elevation, sticks, reading, ad
       listsOf(solved),
       ...(sticks && solved.stock ? [sticksPicture(sticks, solved.stock)] : []),
     ],
-    cautions: cautionsOf(given),
+    cautions: cautionsOf(height),
     address,
     reading,
   }
 }
 
-function closingLine(closing: HandrailOutputs['closing'][number], tape: number): string {
-  return `flight ${closing.flight}: ${closingText(closing, tape).replace(/^The/, 'the')}`
+/** What the third tapes said: one line where all close, one a flight that does not. */
+function closingLines(closing: HandrailOutputs['closing'], tape: number): Line[] {
+  const open = closing.filter(({ verdict }) => verdict === 'measure again')
+  if (open.length > 0) return open.map((one): Line => [{ strong: `Flight ${one.flight}: ${closingText(one, tape)}` }])
+  if (closing.length === 0) return []
+  const most = Math.max(...closing.map(({ error }) => Math.abs(error)))
+  return [['closing check within ', { tape: most }]]
 }
 
 function remarksOf({ warnings }: HandrailOutputs): Remarks[] {
@@ -79,14 +84,12 @@ const sticksPicture = (sketch: Sketch, stock: NonNullable<HandrailOutputs['stock
   as: 'strip',
 })
 
-function cautionsOf({ railHeight }: HandrailInputs): Line[] {
+function cautionsOf(height: string): Line[] {
   return [
     [
       { strong: 'Dry-fit on the stair before you weld out.' },
       ' Heights, extensions, loads and fixings are decided by the adopted local code and a licensed professional.',
     ],
-    [
-      `At the dry fit: ${showTape(railHeight, 16)} plumb at every nosing, level runs level, both ends past the nosings.`,
-    ],
+    [`At the dry fit: ${height} plumb at every nosing, level runs level, both ends past the nosings.`],
   ]
 }

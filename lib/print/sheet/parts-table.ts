@@ -3,14 +3,14 @@ import { sawReading } from '@/lib/trade/rail/words'
 import type { Cell, Column, Line, SheetReading, Table } from './sheet'
 
 const columns: readonly Column[] = [
-  { head: 'Mark', share: 5, as: 'mark' },
-  { head: 'Qty', share: 4, as: 'words' },
+  { head: 'Mark', share: 8, as: 'mark' },
+  { head: 'Qty', share: 3.5, as: 'words' },
   { head: 'Top edge', under: 'same face', share: 14, as: 'number' },
   { head: 'Underside', under: 'same face', share: 14, as: 'number' },
   { head: 'Blank', under: 'tip to tip', share: 14, as: 'number' },
   { head: 'Low end', under: 'saw, long point', share: 15, as: 'number' },
   { head: 'High end', under: 'saw, long point', share: 15, as: 'number' },
-  { head: 'Between', under: 'cuts', share: 11, as: 'words' },
+  { head: 'Between', under: 'cuts', share: 9.5, as: 'words' },
   { head: 'Cut', share: 4, as: 'words' },
   { head: 'Chk', share: 4, as: 'words' },
 ]
@@ -22,7 +22,7 @@ export function partsTable({ parts, returns }: HandrailOutputs, reading: SheetRe
     title: 'Parts',
     columns,
     rows: [...parts.map((part) => partRow(part, reading)), ...returns.map((piece) => returnRow(piece, parts, reading))],
-    key: keyOf(parts, reading),
+    key: keyOf(parts, returns, reading),
   }
 }
 
@@ -50,17 +50,18 @@ function endCell({ longPoint, saw, exact }: PartEnd, sawSquare: 0 | 90): Cell {
   if (longPoint === 'square') return { line: [{ strong: 'square' }] }
   const reads = { dial: sawReading(saw, sawSquare) }
   const under = `${Number(sawReading(exact, sawSquare).toFixed(2))}° exactly`
-  if (longPoint === 'room side (plan)') return { line: [reads, ' in plan'], under: ['long on the room side'] }
+  if (longPoint === 'room side (plan)') return { line: [reads, ' in plan'], under: ['long on room side'] }
   return { line: [reads, ' ', { face: longPoint }, longPoint === 'top' ? ' top' : ' under'], under: [under] }
 }
 
 /** What the hand does between the two cuts of a part; nothing where one way of lying on the saw serves both. */
-function betweenCell({ cuts, turn, note }: RailPart): Cell {
+function betweenCell({ cuts, turn }: RailPart): Cell {
   const handling = cuts.startsWith('parallel') ? 'SLIDE' : cuts.startsWith('opposed') ? 'ROLL' : ''
-  const under = [turn, note].filter((text) => text !== undefined).join('; ')
-  const strong = handling || (turn ? 'TURN' : '')
-  return { line: strong ? [{ strong }] : ['–'], ...(under ? { under: [under] } : {}) }
+  const words = [handling, turn ? 'TURN' : ''].filter((word) => word !== '').join(', ')
+  return { line: words ? [{ strong: words }] : ['–'] }
 }
+
+const isRolled = ({ rolledWithRake }: RailReturn) => Math.abs(rolledWithRake) >= 0.005
 
 /** A return is cut once in plan and once square; its edges are its long and short point. */
 function returnRow(
@@ -70,22 +71,20 @@ function returnRow(
 ): Cell[] {
   const part = piece.end === 'bottom' ? parts[0] : parts.at(-1)
   return [
-    { line: [{ strong: `${part?.mark ?? ''}r` }], under: [`${piece.end} return`] },
+    { line: [{ strong: `${part?.mark ?? ''}r` }], under: ['return'] },
     word('1'),
     { line: [{ tape: piece.longPoint }], under: ['long point'] },
     { line: [{ tape: piece.shortPoint }], under: ['short point'] },
     length(piece.longPoint),
-    { line: [{ dial: sawReading(45, sawSquare) }, ' in plan'], under: [`turns ${piece.turns} to the wall`] },
+    { line: [{ dial: sawReading(45, sawSquare) }, ' in plan'], under: [`turns ${piece.turns}`] },
     { line: [{ strong: 'square' }], under: ['at the wall'] },
-    Math.abs(piece.rolledWithRake) >= 0.005
-      ? { line: [{ strong: 'ROLL' }], under: [`with the rake, ${piece.rolledWithRake.toFixed(2)}°`] }
-      : word('–'),
+    isRolled(piece) ? { line: [{ strong: 'RAKE' }], under: [`${piece.rolledWithRake.toFixed(2)}°`] } : word('–'),
     tick,
     tick,
   ]
 }
 
-function keyOf(parts: readonly RailPart[], { precision }: SheetReading): Line {
+function keyOf(parts: readonly RailPart[], returns: readonly RailReturn[], { precision }: SheetReading): Line {
   const ends = parts.flatMap(({ endA, endB }) => [endA.longPoint, endB.longPoint])
   const said = (kind: string) => parts.some(({ cuts }) => cuts.startsWith(kind))
   return [
@@ -93,6 +92,18 @@ function keyOf(parts: readonly RailPart[], { precision }: SheetReading): Line {
     ...(ends.includes('underside') ? [{ face: 'underside' } as const, ' long underneath   '] : []),
     ...(said('parallel') ? ['SLIDE: slide the stock, do not roll it   '] : []),
     ...(said('opposed') ? ['ROLL: roll the stock half over between cuts   '] : []),
+    ...(parts.some(({ turn }) => turn) ? ['TURN: turn the stock a quarter between cuts   '] : []),
+    ...(returns.some(isRolled) ? ['RAKE: roll the return with the rake by the angle under it   '] : []),
+    ...notesOf(parts),
     `lengths to 1/${precision.tape}, exact inches small`,
   ]
+}
+
+/** What was added for a return or taken off for a volute, each once with the parts it is said of. */
+function notesOf(parts: readonly RailPart[]): Line {
+  const notes = new Set(parts.flatMap(({ note }) => note ?? []))
+  return [...notes].map((note) => {
+    const marks = parts.filter((part) => part.note === note).map(({ mark }) => mark)
+    return `${marks.join(', ')}: ${note}   `
+  })
 }

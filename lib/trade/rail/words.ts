@@ -1,4 +1,6 @@
 import { showDial } from '../quantity/dial'
+import { partsOf, showParts } from '../quantity/fraction'
+import { showMetric } from '../quantity/metric'
 import { showTape } from '../quantity/tape'
 import type { Closing, PartEnd, RailSticks, Section } from './types'
 
@@ -29,6 +31,11 @@ export function sectionText({ shape, depth, width }: Section, den: number): stri
   return depth === width
     ? `${size(depth)} ${shapeWords[shape]}`
     : `${size(depth)} × ${size(width)} ${shapeWords[shape]}`
+}
+
+/** A height, which the trade says in inches alone: 36", not 3'-0"; in millimetres where the reader asks for them. */
+export function heightText(inches: number, den: number, units: 'in' | 'mm'): string {
+  return units === 'mm' ? showMetric(inches) : `${showParts(partsOf(inches, den))}"`
 }
 
 /** A slope to the hundredth of a degree, with a true minus. */

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { closingText, endText, sectionText, slopeText, sticksText } from '@/lib/trade/rail/words'
+import { closingText, endText, sectionText, slopeText, sticksText, heightText } from '@/lib/trade/rail/words'
 
 describe('words of a rail', () => {
   it('says whether fewer sticks could do', () => {
@@ -24,6 +24,11 @@ describe('words of a rail', () => {
   it('names a section as it is ordered', () => {
     expect(sectionText({ shape: 'round', depth: 1.66, width: 1.66 }, 16)).toBe('1.66 in round')
     expect(sectionText({ shape: 'rect', depth: 2, width: 1.5 }, 16)).toBe('2" × 1 1/2" rectangular')
+  })
+
+  it('says a height in inches alone', () => {
+    expect(heightText(36.5, 16, 'in')).toBe('36 1/2"')
+    expect(heightText(36, 16, 'mm')).toBe('914 mm')
   })
 
   it('sets a true minus before a fall', () => {
