@@ -71,7 +71,7 @@ export const handrailFields = {
   landings: list('Landings', landing, { least: 0, most: 11 }, { fallback: null }),
   bottom: group('Bottom end', {
     type: choice('Bottom end', ['none', 'slope', 'level'], {
-      names: ['Square at the nosing', 'On down the slope', 'Level'],
+      names: ['At the nosing', 'Down the slope', 'Level'],
     }),
     horizontal: inches('Reach past the bottom nosing, level', { ...length, fallback: null }),
     length: inches('Length of the level run', { ...length, fallback: null, hint: 'Outward from the knuckle.' }),
@@ -79,7 +79,7 @@ export const handrailFields = {
     return: returnToWall,
   }),
   top: group('Top end', {
-    type: choice('Top end', ['none', 'level'], { names: ['Square at the nosing', 'Level'] }),
+    type: choice('Top end', ['none', 'level'], { names: ['At the nosing', 'Level'] }),
     length: inches('Length past the top nosing', { ...length, fallback: null }),
     slopeInPerFt: slope,
     railHeight: inches('Rail height at the top', { ...railHeight, fallback: null }),
