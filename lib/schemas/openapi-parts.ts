@@ -12,6 +12,12 @@ export function bare(schema: z.ZodType, io: 'input' | 'output') {
   return document
 }
 
+/** A printable page. */
+export const page = {
+  description: 'One page, PDF',
+  content: { 'application/pdf': { schema: { type: 'string', format: 'binary' } } },
+}
+
 /** A refusal in the form of RFC 9457. */
 export const problem = (description: string) => ({
   description,

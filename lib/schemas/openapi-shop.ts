@@ -1,6 +1,7 @@
 import { passwordSchema, preferencesChangeSchema, preferencesSchema, startSchema } from './account'
 import { archiveSchema, jobChangeSchema, jobSchema, sheetRevisionSchema, sheetSchema } from './job'
-import { json, problem, refusals } from './openapi-parts'
+import { json, page, problem, refusals } from './openapi-parts'
+import { papers } from './sheet'
 import { accountSchema, jobsPageSchema, jobViewSchema, meSchema, revisionLineSchema, sheetViewSchema } from './views'
 import { z } from './zod'
 
@@ -15,6 +16,8 @@ interface Operation {
   /** May be overtaken by somebody else's save. */
   versioned?: boolean
   open?: boolean
+  /** Answers with a page to print. */
+  prints?: boolean
 }
 
 const inPath = (name: string, type: z.ZodType) => ({ name, in: 'path', required: true, schema: z.toJSONSchema(type) })
@@ -28,14 +31,24 @@ const key = {
   schema: { type: 'string', minLength: 8, maxLength: 100 },
 }
 
-function operation({ summary, body, answer, status = 200, parameters = [], creates, versioned, open }: Operation) {
+function operation({
+  summary,
+  body,
+  answer,
+  status = 200,
+  parameters = [],
+  creates,
+  versioned,
+  open,
+  prints,
+}: Operation) {
   return {
     summary,
     parameters: creates ? [...parameters, key] : parameters,
     security: open ? [] : [{ session: [] }],
     ...(body ? { requestBody: { required: true, content: json(body, 'input') } } : {}),
     responses: {
-      [status]: { description: 'Done', ...(answer ? { content: json(answer) } : {}) },
+      [status]: prints ? page : { description: 'Done', ...(answer ? { content: json(answer) } : {}) },
       ...(body ? refusals : {}),
       ...(open
         ? {}
@@ -124,6 +137,13 @@ export const shopPaths = {
       status: 201,
       creates: true,
       versioned: true,
+    }),
+  },
+  '/api/jobs/{id}/sheets/{sheet}/pdf': {
+    get: operation({
+      summary: 'A revision as it is printed; an earlier one says that it is superseded',
+      parameters: [job, sheet, inQuery('revision', z.int().min(1)), inQuery('paper', z.enum(papers))],
+      prints: true,
     }),
   },
   '/api/jobs/{id}/sheets/{sheet}/revisions': {

@@ -1,7 +1,8 @@
 import type { AnyCalculator } from '@/lib/calculators/define'
 import { askSchema, descriptionOf, inputsSchema, outputsSchema } from './calculator'
-import { bare, json, refusals } from './openapi-parts'
+import { bare, json, page, problem, refusals } from './openapi-parts'
 import { shopPaths } from './openapi-shop'
+import { sheetAskSchema } from './sheet'
 import { problemSchema } from './views'
 import { z } from './zod'
 
@@ -31,7 +32,7 @@ function answerSchema(calculator: AnyCalculator) {
 function pathsOf(calculator: AnyCalculator) {
   const path = `/api/calculators/${calculator.id}`
   const tags = [calculator.stage]
-  const body = { required: true, content: json(askSchema.extend({ inputs: inputsSchema(calculator.inputs) }), 'input') }
+  const inputs = inputsSchema(calculator.inputs)
   return {
     [path]: {
       get: {
@@ -45,7 +46,7 @@ function pathsOf(calculator: AnyCalculator) {
         summary: calculator.asks,
         description: calculator.lede,
         tags,
-        requestBody: body,
+        requestBody: { required: true, content: json(askSchema.extend({ inputs }), 'input') },
         responses: { '200': { description: 'The answer', content: json(answerSchema(calculator)) }, ...refusals },
       },
     },
@@ -54,13 +55,11 @@ function pathsOf(calculator: AnyCalculator) {
         operationId: `sheet-${calculator.id}`,
         summary: `The printable sheet of ${calculator.name}`,
         tags,
-        requestBody: body,
+        requestBody: { required: true, content: json(sheetAskSchema.extend({ inputs }), 'input') },
         responses: {
-          '200': {
-            description: 'One page, PDF',
-            content: { 'application/pdf': { schema: { type: 'string', format: 'binary' } } },
-          },
+          '200': page,
           ...refusals,
+          '429': problem('Too many sheets asked for; the answer says when to come back.'),
         },
       },
     },

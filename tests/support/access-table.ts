@@ -55,6 +55,8 @@ export const accessTable: { [route: string]: Row } = {
   'calculators/[id] GET': { params: miter, answers: everybody(200) },
   'calculators/[id] POST': { params: miter, body: () => ({ inputs: sheetForm.inputs }), answers: everybody(200) },
   'calculators/[id] OPTIONS': { params: miter, answers: everybody(204) },
+  'calculators/[id]/sheet POST': { params: miter, body: () => ({ inputs: sheetForm.inputs }), answers: everybody(200) },
+  'calculators/[id]/sheet OPTIONS': { params: miter, answers: everybody(204) },
   'openapi.json GET': { answers: everybody(200) },
   'openapi.json OPTIONS': { answers: everybody(204) },
   'me GET': { answers: everybody(200) },
@@ -75,5 +77,6 @@ export const accessTable: { [route: string]: Row } = {
     body: () => ({ ...sheetForm, note: 'again', revises: 1 }),
     answers: writesJob(201),
   },
+  'jobs/[id]/sheets/[sheet]/pdf GET': { params: sheet, answers: readsJob },
   'jobs/[id]/sheets/[sheet]/revisions GET': { params: sheet, answers: readsJob },
 }

@@ -1,3 +1,4 @@
+import { computeSheet } from '@/lib/data/compute-sheet'
 import { CutSheet, Job } from '@/models'
 import type { Person } from './people'
 
@@ -8,12 +9,11 @@ export async function newJob(owner: Person, name = 'A job'): Promise<string> {
   return id
 }
 
-/** A cut sheet's row as a save leaves it; its numbers are stand-ins for tests that do not look at them. */
+/** A cut sheet's row as a save leaves it. */
 export async function newSheet(owner: Person, jobId: string, sheet = 1): Promise<void> {
-  const results = { id: 'miter', revision: 1, inputs: {}, outputs: {}, text: {}, steps: [], warnings: [], sources: [] }
-  const numbers = { calculator: 'miter', calculatorRevision: 1, inputs: {}, results }
-  const head = { name: 'A sheet', measuredBy: 'A hand', measuredOn: '2026-03-31', instrument: '', note: '' }
-  await CutSheet.create({ jobId, sheet, revision: 1, ...head, ...numbers, createdBy: owner.id })
+  const { calculator, inputs, ...head } = sheetForm
+  const numbers = await computeSheet({ calculator, inputs })
+  await CutSheet.create({ jobId, sheet, revision: 1, ...head, note: '', ...numbers, createdBy: owner.id })
 }
 
 /** The form of a sheet whose bend is 34 degrees. */

@@ -1,6 +1,7 @@
 import { standing, type Answer } from '@/lib/calculators/answer'
 import type { AnyCalculator } from '@/lib/calculators/define'
 import type { Sketch } from '@/lib/drawing/sketch'
+import { showDial } from '@/lib/trade/quantity/dial'
 import { foundRows } from './found-rows'
 import { givenRows } from './given-rows'
 import {
@@ -37,7 +38,7 @@ export function plainSheetOf({ head, calculator, answer, sketch, reading, addres
     ...(head.kept?.supersededBy === undefined ? {} : { supersededBy: head.kept.supersededBy }),
     facts: [
       [`Lengths to 1/${reading.precision.tape} in`],
-      [`dial to ${reading.precision.dial}°`],
+      [`Dial to ${showDial(reading.precision.dial, reading.precision.dial)}`],
       ['Saw ', { strong: `${reading.preferences.sawSquare} = square` }],
     ],
     blocks: [
