@@ -1,14 +1,8 @@
-import path from 'node:path'
 import { inkDashes } from '@/lib/drawing/inks'
-import type { Mark, PlacedLabel, PlacedRun, Plate } from '@/lib/drawing/plate'
-import { shapeOutline } from '@/lib/drawing/shapes'
+import type { Mark, PlacedLabel, Plate } from '@/lib/drawing/plate'
 import type { Fill, Ink } from '@/lib/drawing/sketch'
-
-type Pdf = PDFKit.PDFDocument
-
-/** WOFF of one weight each: from WOFF2 pdfkit embeds empty glyphs, and it cannot pick a weight of a variable file. */
-const fonts = path.join(process.cwd(), 'fonts', 'print')
-const faces = { mono: 'drawing numbers', word: 'drawing words' } as const
+import type { Pdf } from './faces'
+import { writeRun } from './write'
 
 /** Black on white: what is cut and what is wrong stay black, what only explains is grey. */
 const lineColours: Readonly<Record<Ink, string>> = {
@@ -31,12 +25,6 @@ const fillColours: Readonly<Record<Fill, string | null>> = {
   tape: '#f4f4f4',
   shade: '#d8d8d8',
   ground: '#fff',
-}
-
-/** Makes the two faces of a drawing known to a document; once a document, before drawPlate. */
-export function registerDrawingFonts(doc: Pdf): void {
-  doc.registerFont(faces.mono, path.join(fonts, 'atkinson-hyperlegible-mono-latin-600-normal.woff'))
-  doc.registerFont(faces.word, path.join(fonts, 'barlow-condensed-latin-600-normal.woff'))
 }
 
 /** Draws a composed plate with its upper left corner at x, y; `pointsPerPx` sizes it (0.75 is its own size on paper). */
@@ -67,15 +55,6 @@ function drawLabel(doc: Pdf, label: PlacedLabel): void {
   if (isDisc) doc.circle(label.box.x, label.box.y, label.box.halfWidth).fill('#000')
   doc.save()
   doc.translate(label.x, label.y).rotate(label.turn)
-  for (const run of label.runs) drawRun(doc, run, isDisc ? '#fff' : run.ink === 'quiet' ? '#333' : '#000')
+  for (const run of label.runs) writeRun(doc, run, isDisc ? '#fff' : run.ink === 'quiet' ? '#333' : '#000')
   doc.restore()
-}
-
-function drawRun(doc: Pdf, run: PlacedRun, colour: string): void {
-  if (run.kind === 'text') {
-    doc.font(faces[run.face]).fontSize(run.size).fillColor(colour)
-    doc.text(run.text, run.x, run.y, { lineBreak: false, baseline: 'alphabetic' })
-    return
-  }
-  doc.polygon(...shapeOutline(run).map(({ x, y }): [number, number] => [x, y])).fill(colour)
 }

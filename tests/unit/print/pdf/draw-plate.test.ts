@@ -2,7 +2,8 @@ import PDFDocument from 'pdfkit'
 import { describe, expect, it } from 'vitest'
 import { draw } from '@/components/drawing/pitch'
 import { compose } from '@/lib/drawing/compose'
-import { drawPlate, registerDrawingFonts } from '@/lib/print/plate-to-pdf'
+import { drawPlate } from '@/lib/print/pdf/draw-plate'
+import { registerFaces } from '@/lib/print/pdf/faces'
 import { pitchFrom } from '@/lib/trade/pitch'
 import { isRefusal } from '@/lib/trade/refusal'
 
@@ -19,7 +20,7 @@ async function sheet(): Promise<string> {
   const chunks: Buffer[] = []
   doc.on('data', (chunk: Buffer) => chunks.push(chunk))
   const ended = new Promise((resolve) => doc.on('end', resolve))
-  registerDrawingFonts(doc)
+  registerFaces(doc)
   drawPlate(doc, plate, { x: 36, y: 36, pointsPerPx: 0.75 })
   doc.end()
   await ended
