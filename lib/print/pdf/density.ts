@@ -52,7 +52,7 @@ export const densities: readonly Density[] = [
 const words = (size: number): Style => ({
   plain: { face: 'text', size },
   strong: { face: 'bold', size },
-  number: size * 1.06,
+  number: size * 1.18,
 })
 
 /** Running words, and small ones under them. */

@@ -6,7 +6,7 @@ import { widthOf, write } from './write'
 
 const inch = 72
 const apart = 14
-const ruleGap = 8
+const ruleGap = 10
 /** Words beside the ruler no higher than this; more of them go over it, across the sheet. */
 const tallest = 104
 
@@ -24,9 +24,9 @@ export function footOf(setup: Setup, sheet: Sheet, width: number): Part {
   return {
     height,
     draw: (x, y) => {
-      setup.doc.rect(x, y, width, 0.8).fill('#000')
       const bottom = y + height
       if (code) drawCode(setup.doc, code, x, bottom - side, side)
+      setup.doc.rect(x, y, width, 0.8).fill('#000')
       if (isWide) cautions.draw(x, y + ruleGap)
       else cautions.draw(x + (code ? side + apart : 0), bottom - cautions.height)
       drawRuler(setup.doc, x + width - 3 * inch, bottom - 12)
@@ -47,6 +47,8 @@ function cautionsOf(setup: Setup, { cautions }: Sheet, width: number, size: numb
 /** The code as one path, a rectangle for each stretch of dark modules in a row. */
 function drawCode(doc: Setup['doc'], { size, dark }: QrModules, x: number, y: number, side: number): void {
   const dot = side / size
+  // Four modules of white round it, as readers ask for, whatever lies under the sheet.
+  doc.rect(x - 4 * dot, y - 4 * dot, side + 8 * dot, side + 8 * dot).fill('#fff')
   for (let row = 0; row < size; row++) {
     for (let from = 0; from < size; from++) {
       if (!dark[row * size + from]) continue

@@ -1,12 +1,26 @@
 import type { Line, Sheet } from '../sheet/sheet'
 import { headStyle } from './density'
 import { capShare } from './faces'
-import { setLine, type Part, type Setting, type Setup } from './set-line'
+import { fitted } from './fit'
+import { setLine, type Part, type Setup } from './set-line'
 import { widthOf, write } from './write'
 
 const inch = 72
 const apart = 16
 const rule = 2.2
+const titleTries = [
+  [26, 1],
+  [23, 1],
+  [20, 2],
+  [17, 2],
+  [15, 2],
+] as const
+const underTries = [
+  [13.2, 2],
+  [12, 2],
+  [10.6, 3],
+  [9.4, 4],
+] as const
 
 /** Head of the first page: what it is, when and by whom it was measured, and the hand in an inch-high letter. */
 export function headOf(setup: Setup, sheet: Sheet, width: number, page: string): Part {
@@ -18,8 +32,8 @@ export function headOf(setup: Setup, sheet: Sheet, width: number, page: string):
     room * 0.38,
   )
   const beside = room - (particulars.width > 0 ? particulars.width + apart : 0)
-  const title = fitted(setup, sheet.title, beside, { sizes: [26, 23, 20], rows: 1, last: 2 })
-  const under = fitted(setup, sheet.under, beside, { sizes: [13.2, 12, 10.6, 9.4], rows: 2, last: 3 })
+  const title = fitted(setup, sheet.title, beside, titleTries)
+  const under = fitted(setup, sheet.under, beside, underTries)
   const height = Math.max(title.height + 2 + under.height, particulars.height, hand?.height ?? 0)
   return {
     height: height + 5 + rule,
@@ -48,22 +62,6 @@ export function smallHeadOf(setup: Setup, sheet: Sheet, width: number, page: str
       setup.doc.rect(x, y + height + 4, width, rule).fill('#000')
     },
   }
-}
-
-interface Fit {
-  /** Tried from the largest. */
-  sizes: readonly number[]
-  /** Rows that a size may take, and that the last one may. */
-  rows: number
-  last: number
-}
-
-/** A text in the largest size that needs no more rows; at the smallest it wraps further, then ends in an ellipsis. */
-function fitted(setup: Setup, text: string, width: number, { sizes, rows, last }: Fit): Setting {
-  const [size = 10, ...smaller] = sizes
-  const isLast = smaller.length === 0
-  const set = setLine(setup, [text], headStyle(size), { width, most: isLast ? last : rows })
-  return set.cut && !isLast ? fitted(setup, text, width, { sizes: smaller, rows, last }) : set
 }
 
 /** Lines of who, when and with what, to the right; many of them are set smaller. */

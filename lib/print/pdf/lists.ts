@@ -1,6 +1,7 @@
 import type { List, Lists } from '../sheet/sheet'
-import { headStyle, smallStyle, textStyle, type Density } from './density'
-import { besideFlow, rowsFlow, stack, type Flow } from './flow'
+import { smallStyle, textStyle, type Density } from './density'
+import { fitted } from './fit'
+import { besideFlow, blank, rowsFlow, stack, type Flow } from './flow'
 import { lineWidth, setLine, type Part, type Setup } from './set-line'
 import { weldSymbol } from './weld-symbol'
 
@@ -25,22 +26,27 @@ function under([first, ...rest]: readonly Flow[], gap: number): Flow {
   if (!first) return { height: 0, take: () => ({ part: stack([]), rest: null }) }
   if (rest.length === 0) return first
   const later = under(rest, gap)
-  const space = { height: gap, draw: () => {} }
   return {
     height: first.height + gap + later.height,
-    take: (room) => {
-      const taken = first.take(room)
+    take: (room, isFresh) => {
+      const taken = first.take(room, isFresh)
       if (!taken) return null
       if (taken.rest) return { part: taken.part, rest: under([taken.rest, ...rest], gap) }
       const next = later.take(room - taken.part.height - gap)
-      return next ? { part: stack([taken.part, space, next.part]), rest: next.rest } : { part: taken.part, rest: later }
+      return next
+        ? { part: stack([taken.part, blank(gap), next.part]), rest: next.rest }
+        : { part: taken.part, rest: later }
     },
   }
 }
 
 function listOf(setup: Setup, { title, rows, symbol }: List, width: number, density: Density): Flow {
-  const heading = setLine(setup, [title], headStyle(density.heading), { width })
-  const top = stack([heading, { height: 2, draw: () => {} }, ...(symbol ? [weldSymbol(setup.doc, width)] : [])])
+  const heading = fitted(setup, title, width, [
+    [density.heading, 1],
+    [density.heading * 0.88, 1],
+    [density.heading, 3],
+  ])
+  const top = stack([heading, blank(2), ...(symbol ? [weldSymbol(setup.doc, width)] : [])])
   const name = nameWidth(setup, rows, width, density)
   return rowsFlow({ top, rows: rows.map((row) => rowOf(setup, row, { width, name }, density)) })
 }
@@ -60,15 +66,15 @@ function rowOf(
   const style = textStyle(density)
   const room = width - name - 2 * inset
   const named = setLine(setup, [{ strong: row.name }], style, { width: Math.max(1, name - 6) })
-  const said = stack([
-    setLine(setup, row.line, style, { width: room }),
-    ...(row.under ? [setLine(setup, row.under, smallStyle(density), { width: room })] : []),
-  ])
-  const height = Math.max(named.height, said.height) + 2 * density.rowPad
+  const line = setLine(setup, row.line, style, { width: room })
+  const said = stack([line, ...(row.under ? [setLine(setup, row.under, smallStyle(density), { width: room })] : [])])
+  // Numbers are larger than names: both stand on one baseline.
+  const lower = Math.max(0, line.baseline - named.baseline)
+  const height = Math.max(named.height + lower, said.height) + 2 * density.rowPad
   return {
     height,
     draw: (x, y) => {
-      if (name > 0) named.draw(x + inset, y + density.rowPad)
+      if (name > 0) named.draw(x + inset, y + density.rowPad + lower)
       said.draw(x + inset + name, y + density.rowPad)
       setup.doc
         .moveTo(x, y + height)

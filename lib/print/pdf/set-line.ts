@@ -13,6 +13,8 @@ export interface Setting extends Part {
   /** Of the widest row. */
   width: number
   rows: number
+  /** Of the first row, from the upper edge. */
+  baseline: number
   /** True where rows were left out. */
   cut: boolean
 }
@@ -49,6 +51,7 @@ export function setLine({ doc, reading }: Setup, line: Line, style: Style, measu
     width: Math.max(0, ...rows.map((row) => row.width)),
     height: rows.length * size * leading,
     rows: rows.length,
+    baseline: size * baseline,
     cut,
     draw: (x, y) =>
       rows.forEach((row, i) =>

@@ -5,12 +5,11 @@ import type { Density } from './density'
 import { factsOf } from './facts'
 import { footOf } from './foot'
 import { headOf, smallHeadOf } from './head'
-import { stack } from './flow'
-import { pagesOf, type Page } from './layout'
+import { blank, stack } from './flow'
+import { pagesOf } from './layout'
+import type { Page } from './paginate'
 import type { Part, Setup } from './set-line'
 import { supersededAcross, supersededBar } from './superseded'
-
-const space = (height: number): Part => ({ height, draw: () => {} })
 
 /** Draws a sheet for one paper as a PDF: on one page wherever it can be read on one. The same sheet gives the same bytes. */
 export async function sheetToPdf(sheet: Sheet, paper: Paper): Promise<Buffer> {
@@ -36,13 +35,13 @@ function topOf(setup: Setup, sheet: Sheet, { width }: Ground, density: Density, 
   return stack([
     ...barOf(setup, sheet, width),
     headOf(setup, sheet, width, page),
-    space(density.gap * 0.7),
-    ...(sheet.facts.length > 0 ? [factsOf(setup, sheet.facts, width, density), space(density.gap)] : []),
+    blank(density.gap * 0.7),
+    ...(sheet.facts.length > 0 ? [factsOf(setup, sheet.facts, width, density), blank(density.gap)] : []),
   ])
 }
 
 const furtherTop = (setup: Setup, sheet: Sheet, { width }: Ground, page: string): Part =>
-  stack([...barOf(setup, sheet, width), smallHeadOf(setup, sheet, width, page), space(10)])
+  stack([...barOf(setup, sheet, width), smallHeadOf(setup, sheet, width, page), blank(10)])
 
 const barOf = (setup: Setup, { supersededBy }: Sheet, width: number): Part[] =>
   supersededBy === undefined ? [] : [supersededBar(setup, supersededBy, width)]

@@ -1,4 +1,4 @@
-import type { Cell, Line } from '../sheet/sheet'
+import type { Cell, Line, SheetReading } from '../sheet/sheet'
 import type { Density } from './density'
 import type { Pdf } from './faces'
 import { setLine, type Setting, type Setup } from './set-line'
@@ -16,14 +16,13 @@ interface SetCell {
 }
 interface Measure {
   width: number
-  isNumber: boolean
   style: CellStyle
   density: Density
 }
 
 /** Measures what stands in one cell of a table. */
-export function setCell(setup: Setup, cell: Cell, { width, isNumber, style, density }: Measure): SetCell {
-  const { line, under } = isNumber ? inUnits(setup, cell) : cell
+export function setCell(setup: Setup, cell: Cell, { width, style, density }: Measure): SetCell {
+  const { line, under } = cell
   const set = (words: Line | undefined, words_: Style) =>
     words && words.length > 0 ? [setLine(setup, words, words_, { width, align: 'centre' })] : []
   const lines = [...set(line, style.line), ...set(under, style.under)]
@@ -38,11 +37,10 @@ export function setCell(setup: Setup, cell: Cell, { width, isNumber, style, dens
   }
 }
 
-/** In millimetres the tape goes under the number, where it has room. */
-function inUnits({ reading }: Setup, { line, under }: Cell): Cell {
-  if (reading.preferences.units === 'in') return { line, ...(under ? { under } : {}) }
+/** A cell as its reader reads it: in millimetres the tape goes under the number, where it has room. */
+export function inUnits({ line, under, ...box }: Cell, reading: SheetReading): Cell {
   const tapes = line.flatMap((piece) => (typeof piece === 'object' && 'tape' in piece ? [piece.tape] : []))
-  if (tapes.length === 0) return { line, ...(under ? { under } : {}) }
+  if (reading.preferences.units === 'in' || tapes.length === 0) return { line, ...(under ? { under } : {}), ...box }
   const both = tapes.map((tape) => bothUnits(tape, reading))
   let at = 0
   return {

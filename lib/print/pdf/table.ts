@@ -1,7 +1,7 @@
 import type { Cell, Column, Line, Table } from '../sheet/sheet'
 import { headStyle, numberStyle, smallStyle, textStyle, type Density } from './density'
 import { rowsFlow, type Flow } from './flow'
-import { drawCell, setCell, type CellStyle } from './table-cell'
+import { drawCell, inUnits, setCell, type CellStyle } from './table-cell'
 import { lineWidth, setLine, type Part, type Setting, type Setup } from './set-line'
 
 const pad = 3
@@ -15,8 +15,9 @@ interface Placed extends Column {
 
 /** A table: heads on grey, a row a part, its key under it. Where a page ends, the heads come again. */
 export function tableOf(setup: Setup, table: Table, width: number, density: Density): Flow {
-  const columns = placed(setup, table, width, density)
-  const rows = table.rows.map((cells) => rowOf(setup, columns, cells, density))
+  const read = table.rows.map((cells) => cells.map((cell) => inUnits(cell, setup.reading)))
+  const columns = placed(setup, { ...table, rows: read }, width, density)
+  const rows = read.map((cells) => rowOf(setup, columns, cells, density))
   const key = table.key && keyOf(setup, table.key, width, density)
   return rowsFlow({ top: headRow(setup, columns, density), rows, ...(key ? { end: key } : {}) })
 }
@@ -66,8 +67,8 @@ function styleOf(as: Column['as'], density: Density, line: number, under: number
 }
 
 function rowOf(setup: Setup, columns: readonly Placed[], cells: readonly Cell[], density: Density): Part {
-  const set = columns.map(({ width, as, style }, i) =>
-    setCell(setup, cells[i] ?? { line: [] }, { width: width - 2 * pad, isNumber: as === 'number', style, density }),
+  const set = columns.map(({ width, style }, i) =>
+    setCell(setup, cells[i] ?? { line: [] }, { width: width - 2 * pad, style, density }),
   )
   const height = Math.max(...set.map((cell) => cell.height)) + 2 * density.cellPad
   return {
@@ -87,9 +88,7 @@ function rowOf(setup: Setup, columns: readonly Placed[], cells: readonly Cell[],
 
 function headRow(setup: Setup, columns: readonly Placed[], { tableHead, cellPad }: Density): Part {
   const set = columns.map((column) => headLines(setup, column, tableHead))
-  const height =
-    Math.max(...set.flat().map((_, i, all) => (i < all.length ? 0 : 0)), ...set.map(heightOf)) +
-    2 * Math.min(cellPad, 3)
+  const height = Math.max(...set.map(heightOf)) + 2 * Math.min(cellPad, 3)
   return {
     height,
     draw: (x, y) =>

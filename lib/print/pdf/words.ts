@@ -38,6 +38,10 @@ export const sizeOf = ({ plain: words, strong, number }: Style, line: Line): num
     ...line.map((piece) => (typeof piece === 'string' ? 0 : 'strong' in piece ? strong.size : number)),
   )
 
+/** A no-break space parts nothing. */
+const gaps = /[^\S\u00a0\u202f]+|[\S\u00a0\u202f]+/gu
+const isGap = /^[^\S\u00a0\u202f]/u
+
 /** A line's words, measured. Blanks between pieces part them; pieces that touch stay together. */
 export function wordsOf(doc: Pdf, line: Line, style: Style, reading: SheetReading): Word[] {
   const words: Word[] = []
@@ -58,19 +62,22 @@ export function wordsOf(doc: Pdf, line: Line, style: Style, reading: SheetReadin
   for (const piece of line) {
     if (typeof piece === 'string' || 'strong' in piece) {
       const [text, letters] = typeof piece === 'string' ? [piece, style.plain] : [piece.strong, style.strong]
-      for (const [bit] of text.matchAll(/\s+|\S+/gu)) {
-        if (/^\s/u.test(bit)) blank(letters, bit.length)
+      for (const [bit] of text.matchAll(gaps)) {
+        if (isGap.test(bit)) blank(letters, bit.length)
         else add(textAtom(doc, bit, letters))
       }
-    } else numberAtoms(piece, style, reading).forEach((atom, i) => (i > 0 && blank(style.plain, 1), add(atom)))
+    } else numberAtoms(doc, piece, style, reading).forEach((atom, i) => (i > 0 && blank(style.plain, 1), add(atom)))
   }
   return words
 }
 
+/** Width of a stroke of a blank as a part of its size. */
+export const blankShare = 0.56
+
 /** Three strokes and more are a blank to write on. */
 function textAtom(doc: Pdf, text: string, { face, size }: Letters): Atom {
   const isBlank = /^_{3,}$/.test(text)
-  const width = isBlank ? text.length * size * 0.56 : widthOf(doc, face, size, text)
+  const width = isBlank ? text.length * size * blankShare : widthOf(doc, face, size, text)
   const at = { x: 0, y: 0, size, width }
   return { runs: [isBlank ? { kind: 'rule', ...at } : { kind: 'text', face, text: tidy(text), ...at }], width }
 }
@@ -79,6 +86,7 @@ type Number = Exclude<Piece, string | { strong: string }>
 
 /** Lengths in inches as fractions; in millimetres first, the tape small beside, where the reader asks for them. */
 function numberAtoms(
+  doc: Pdf,
   piece: Number,
   { plain: { size }, number }: Style,
   { precision, preferences }: SheetReading,
@@ -87,7 +95,9 @@ function numberAtoms(
   if ('face' in piece) return [laid([shape(piece.face === 'top' ? 'triangle-down' : 'triangle-up')], size * 1.2)]
   if ('dial' in piece) return [laid(dial(piece.dial, show), number)]
   const first = laid(length(piece.tape, show), number)
-  return show.metric ? [first, laid(length(piece.tape, { ...show, metric: false }), number * 0.72)] : [first]
+  return show.metric
+    ? [first, textAtom(doc, showTape(piece.tape, precision.tape), { face: 'text', size: size * 0.88 })]
+    : [first]
 }
 
 function laid(label: Label, size: number): Atom {
