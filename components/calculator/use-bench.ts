@@ -12,7 +12,8 @@ import { usePreferences } from '../ui/use-preferences'
 import type { RawInputs } from './address'
 import { loadParts } from './parts'
 import { useAddressInputs } from './use-address-inputs'
-import { useAnswer, type Standing } from './use-answer'
+import { useAnswer } from './use-answer'
+import type { Standing } from './use-standing'
 
 /** A calculator at work: what is typed, what comes out, and how this reader reads it. */
 export interface BenchState extends Standing {

@@ -1,6 +1,6 @@
 import { gzipSync } from 'node:zlib'
 import { chromium } from 'playwright-core'
-import type { Page } from 'playwright-core'
+import type { Page, Response } from 'playwright-core'
 
 /**
  * JavaScript a browser fetches by itself when it opens each address for the first time, gzip bytes. More than the page
@@ -21,10 +21,13 @@ export async function loadedScripts(origin: string, addresses: readonly string[]
 
 async function scriptBytes(page: Page, url: string): Promise<number> {
   const sizes: Promise<number>[] = []
-  page.on('response', (response) => {
+  const count = (response: Response) => {
     if (response.request().resourceType() === 'script')
       sizes.push(response.body().then((body) => gzipSync(body).length))
-  })
+  }
+  page.on('response', count)
   await page.goto(url, { waitUntil: 'networkidle' })
+  // What still comes once the page is about to be closed has no body to measure.
+  page.off('response', count)
   return (await Promise.all(sizes)).reduce((total, size) => total + size, 0)
 }

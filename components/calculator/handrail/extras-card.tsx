@@ -1,8 +1,8 @@
 'use client'
 
+import { lazy, Suspense } from 'react'
 import { ChoiceField } from '../../ui/choice-field'
 import { Panel } from '../../ui/panel'
-import { BracketPlaces } from './bracket-places'
 import { placeOf } from './fields-at'
 import { extraNames, withText, type ExtraName } from './measure'
 import { turnExtra } from './measure-edits'
@@ -10,6 +10,9 @@ import { plainExtraKeys } from './measure-keys'
 import { Measured } from './measured'
 import { CautionsBeside } from './sheet-card'
 import { useFieldSheet } from './sheet-context'
+
+/** Few tape every bracket on the stair. */
+const BracketPlaces = lazy(async () => ({ default: (await import('./bracket-places')).BracketPlaces }))
 
 const extras: Readonly<Record<ExtraName, string>> = {
   brackets: 'Brackets',
@@ -74,7 +77,11 @@ function BracketMeasures() {
         value={field ? 'field' : 'spaced'}
         onChange={(way) => store.type((now) => withText(now, 'brackets.way', way))}
       />
-      {field && <BracketPlaces />}
+      {field && (
+        <Suspense fallback={null}>
+          <BracketPlaces />
+        </Suspense>
+      )}
       <div className="measure-pair">
         {(field ? ['jointClear'] : ['endDistance', 'maxSpacing']).map((key) => (
           <Measured key={key} path={`brackets.${key}`} />

@@ -64,10 +64,7 @@ export function FieldSheet({ state }: { state: FieldSheetInput }) {
             />
           </Fragment>
         ))}
-        <Button
-          disabled={measure.flights.length >= mostFlights}
-          onClick={add}
-        >
+        <Button disabled={measure.flights.length >= mostFlights} onClick={add}>
           Add a flight
         </Button>
         <EndCard end="top" mark={marks.top} />

@@ -1,23 +1,23 @@
 'use client'
 
-import type { ReactNode } from 'react'
+import { lazy, Suspense, type ReactNode } from 'react'
 import { CautionPanel } from '../../ui/caution-panel'
 import { useLastUsed } from '../last-used'
-import { Working, type Typeset } from '../working'
-import { FaultSummary } from './fault-summary'
+import type { Typeset } from '../working'
 import { FieldSheet } from './field-sheet'
 import './handrail.css'
 import { LitProvider } from './lit'
 import { OriginBar } from './origin-bar'
 import { placedFaults } from './placed-faults'
 import { RailActions } from './rail-actions'
-import { RailBeingOff } from './rail-being-off'
-import { RailPlateLater } from './later-drawings'
+import { RailBeingOffLater, RailPlateLater, RailResultsLater, WorkingLater } from './later-drawings'
 import { useMadeAhead } from './use-made-ahead'
-import { RailResults } from './rail-results'
 import type { MeasureStore } from './measure-store'
 import { UndoLine } from './undo-line'
 import { pageStore, useHandrail, useKept } from './use-handrail'
+
+/** The sheet is whole for most who come to it. */
+const FaultSummary = lazy(async () => ({ default: (await import('./fault-summary')).FaultSummary }))
 
 interface HandrailScreenProps {
   /** The sheet to work on; left out, the one of the handbook's page. */
@@ -63,10 +63,14 @@ function Bench({ store, typeset, actions, aside, children }: HandrailScreenProps
               </p>
             )}
             <UndoLine kept={state} store={store} />
-            <FaultSummary faults={faults} shown={rail !== null} />
+            {faults.length > 0 && (
+              <Suspense fallback={null}>
+                <FaultSummary faults={faults} shown={rail !== null} />
+              </Suspense>
+            )}
           </div>
           <RailActions state={state} actions={actions} />
-          {rail && <RailResults state={state} rail={rail} />}
+          {rail && <RailResultsLater state={state} rail={rail} />}
           {alone.map(({ signal, text }) => (
             <CautionPanel key={text} signal={signal}>
               {text}
@@ -76,8 +80,8 @@ function Bench({ store, typeset, actions, aside, children }: HandrailScreenProps
       </div>
       <div className="below">
         <div className="below-main">
-          {answer && <Working calculator={calculator} steps={answer.steps} stale={stale} typeset={typeset} />}
-          {rail && !stale && <RailBeingOff {...{ rail, precision }} measure={state.measure} />}
+          {answer && <WorkingLater calculator={calculator} steps={answer.steps} stale={stale} typeset={typeset} />}
+          {rail && !stale && <RailBeingOffLater {...{ rail, precision }} measure={state.measure} />}
           {children}
         </div>
         <div className="below-side">{aside}</div>

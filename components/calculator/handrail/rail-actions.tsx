@@ -2,13 +2,17 @@
 
 import { lazy, Suspense, useState, type ReactNode } from 'react'
 import { Button, ButtonLink } from '../../ui/button'
+import { untilAwake } from './awake'
 import { measureQuery } from './measure-address'
 import { mirrorHand } from './measure-edits'
-import { cutListText } from './plain-text'
 import type { HandrailState } from './use-handrail'
 
 /** Keeping a sheet brings forms and queries along: fetched once there is a measure to keep. */
 const SaveToJob = lazy(async () => ({ default: (await import('../../job/save-to-job')).SaveToJob }))
+
+/** Fetched when somebody stirs, so that it is there when the network is not. */
+const plainText = () => import('./plain-text')
+if (typeof window !== 'undefined') void untilAwake().then(plainText)
 
 interface RailActionsProps {
   state: HandrailState
@@ -24,13 +28,15 @@ export function RailActions({ state, actions }: RailActionsProps) {
     if (!rail) return
     const address = `${location.origin}${location.pathname}${measureQuery(measure)}`
     try {
+      const { cutListText } = await plainText()
       await navigator.clipboard.writeText(cutListText(rail, { precision, preferences }, address))
       setSaid('Copied.')
     } catch {
       setSaid('This device does not let a page copy. Select the numbers and copy them by hand.')
     }
   }
-  if (stale || !rail) return <p className="rail-actions-wait">Print, save and copy stand here as soon as the measures are whole.</p>
+  if (stale || !rail)
+    return <p className="rail-actions-wait">Print, save and copy stand here as soon as the measures are whole.</p>
   return (
     <div className="actions rail-actions no-print">
       {actions ??

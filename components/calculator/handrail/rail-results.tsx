@@ -1,15 +1,12 @@
 'use client'
 
-import { lazy, Suspense } from 'react'
 import { BracketMarks } from './bracket-marks'
+import { CodeRows } from './code-rows'
 import { Joints } from './joints'
 import { PartsTable } from './parts-table'
 import { Sticks } from './sticks-section'
 import type { HandrailState, Rail } from './use-handrail'
 import { WeldLines } from './weld-lines'
-
-/** Asked for by few. */
-const CodeRows = lazy(async () => ({ default: (await import('./code-rows')).CodeRows }))
 
 /** What the rail comes to, in the order in which it is worked. */
 export function RailResults({ state, rail }: { state: HandrailState; rail: Rail }) {
@@ -34,11 +31,7 @@ export function RailResults({ state, rail }: { state: HandrailState; rail: Rail 
       </div>
       <Sticks rail={rail} reading={reading} />
       <WeldLines weld={solved.weld} />
-      {solved.checks && (
-        <Suspense fallback={null}>
-          <CodeRows rows={solved.checks} />
-        </Suspense>
-      )}
+      {solved.checks && <CodeRows rows={solved.checks} />}
     </div>
   )
 }

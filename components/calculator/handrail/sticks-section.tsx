@@ -1,5 +1,5 @@
-import { LaidSticksLater } from './later-drawings'
 import type { Reading } from './reading-of'
+import { LaidSticks } from './sticks'
 import type { Rail } from './use-handrail'
 
 /** The sticks to buy with the parts laid in them. */
@@ -10,7 +10,7 @@ export function Sticks({ rail, reading }: { rail: Rail; reading: Reading }) {
     <section aria-labelledby="sticks">
       <h2 id="sticks">Sticks</h2>
       {stock ? (
-        <LaidSticksLater stock={stock} rail={rail} reading={reading} />
+        <LaidSticks stock={stock} rail={rail} reading={reading} />
       ) : (
         <p>A part is longer than the stick: the remarks name it.</p>
       )}

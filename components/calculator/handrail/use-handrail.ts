@@ -1,7 +1,7 @@
 'use client'
 
 import { useMemo, useSyncExternalStore } from 'react'
-import { standing } from '@/lib/calculators/answer'
+import { answer as answerOf, standing } from '@/lib/calculators/answer'
 import { asAny, type AnyCalculator, type Caution, type Values } from '@/lib/calculators/define'
 import { handrail } from '@/lib/calculators/field/handrail'
 import type { Precision } from '@/lib/calculators/fields'
@@ -10,7 +10,7 @@ import { precisionOf } from '@/lib/schemas/precision'
 import type { HandrailInputs, HandrailOutputs } from '@/lib/trade/rail/types'
 import { usePreferences } from '../../ui/use-preferences'
 import type { RawInputs } from '../address'
-import { useAnswer, type Standing } from '../use-answer'
+import { useStanding, type Standing } from '../use-standing'
 import { inputsOf, measureFromInputs } from './measure-inputs'
 import { measureStore, type Kept, type MeasureStore } from './measure-store'
 
@@ -47,7 +47,7 @@ export function useHandrail(store: MeasureStore): HandrailState {
   const preferences = usePreferences()
   const precision = useMemo(() => precisionOf(preferences), [preferences])
   const raw = useMemo(() => inputsOf(kept.measure), [kept.measure])
-  const stand = useAnswer(calculator, raw, precision)
+  const stand = useStanding(useMemo(() => answerOf(calculator, raw, precision), [raw, precision]))
   const { answer } = stand
   const rail = useMemo(
     () =>

@@ -20,7 +20,10 @@ export function useMadeAhead(origin: Origin, preferences: Preferences): void {
   const phone = usePhone()
   const usual = preferencesAtFirst()
   const same =
-    preferences.tape === usual.tape && preferences.dialStep === usual.dialStep && preferences.units === usual.units
+    preferences.tape === usual.tape &&
+    preferences.dialStep === usual.dialStep &&
+    preferences.sawSquare === usual.sawSquare &&
+    preferences.units === usual.units
   const stands = ahead && !phone && same && origin === 'example'
   useEffect(() => {
     if (!stands) wake()

@@ -1,4 +1,4 @@
-import QRCode from 'qrcode'
+import { create } from 'qrcode'
 
 /** Above so many characters the code is too fine to be read off an inch of paper. */
 const longest = 600
@@ -13,6 +13,6 @@ export interface QrModules {
 /** An address as a QR code, or null where it is too long for one. */
 export function qrModules(address: string): QrModules | null {
   if (address === '' || address.length > longest) return null
-  const { modules } = QRCode.create(address, { errorCorrectionLevel: 'M' })
+  const { modules } = create(address, { errorCorrectionLevel: 'M' })
   return { size: modules.size, dark: Array.from(modules.data, Boolean) }
 }

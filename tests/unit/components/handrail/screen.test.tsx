@@ -37,13 +37,15 @@ const box = (path: string) => {
   return found
 }
 const type = (path: string, value: string) => fireEvent.change(box(path), { target: { value } })
-const marks = () => screen.getAllByRole('rowheader').map((cell) => cell.textContent?.charAt(0))
+/** Marks of the parts listed, once the results have come. */
+const marks = async () =>
+  (await screen.findAllByRole('rowheader', {}, { timeout: 5000 })).map((cell) => cell.textContent?.charAt(0))
 
 describe('the first visit', () => {
-  it('shows the example as an example, with its parts', () => {
+  it('shows the example as an example, with its parts', async () => {
     open()
     expect(screen.getByText('This is an example.')).toBeDefined()
-    expect(marks()).toEqual(['A', 'B', 'C', 'D'])
+    expect(await marks()).toEqual(['A', 'B', 'C', 'D'])
   })
 
   it('stands in climbing order', () => {
@@ -67,11 +69,11 @@ describe('adding, removing and taking back', () => {
     open()
     await userEvent.click(screen.getByRole('button', { name: 'Remove flight 2' }))
     expect(screen.queryByRole('region', { name: 'Landing 1' })).toBeNull()
-    expect(marks()).toEqual(['A', 'B'])
+    expect(await marks()).toEqual(['A', 'B'])
     await userEvent.click(screen.getByRole('button', { name: 'Undo' }))
     expect(box('landings[0].length').value).toBe('48')
     expect(box('flights[1].nosingRake').value).toBe('81 7/8')
-    expect(marks()).toEqual(['A', 'B', 'C', 'D'])
+    expect(await marks()).toEqual(['A', 'B', 'C', 'D'])
     expect(screen.getByText('This is an example.')).toBeDefined()
   })
 
@@ -87,6 +89,7 @@ describe('adding, removing and taking back', () => {
   it('mirrors the hand and keeps every length', async () => {
     open()
     const lengths = () => screen.getAllByRole('cell').map(({ textContent }) => textContent)
+    await marks()
     const before = lengths()
     await userEvent.click(screen.getByRole('button', { name: 'Mirror the hand' }))
     expect(await screen.findByText(/Right hand rail going up/)).toBeDefined()
@@ -100,9 +103,9 @@ describe('what cannot be read', () => {
     type('flights[1].nosingRun', '5,5')
     expect(box('flights[1].nosingRun').getAttribute('aria-invalid')).toBe('true')
     expect(card('Flight 2').getByText(/a comma could be thousands/)).toBeDefined()
-    expect(marks()).toEqual(['A', 'B', 'C', 'D'])
+    expect(await marks()).toEqual(['A', 'B', 'C', 'D'])
     expect(document.querySelector('.rail-results')?.hasAttribute('data-stale')).toBe(true)
-    await userEvent.click(within(screen.getByRole('region', { name: 'To mend' })).getByRole('link'))
+    await userEvent.click(within(await screen.findByRole('region', { name: 'To mend' })).getByRole('link'))
     expect(document.activeElement).toBe(box('flights[1].nosingRun'))
     type('flights[1].nosingRun', '72')
     expect(screen.queryByRole('region', { name: 'To mend' })).toBeNull()
