@@ -55,6 +55,18 @@ function drawLabel(doc: Pdf, label: PlacedLabel): void {
   if (isDisc) doc.circle(label.box.x, label.box.y, label.box.halfWidth).fill('#000')
   doc.save()
   doc.translate(label.x, label.y).rotate(label.turn)
+  doc.markContent('Span', { actual: saidBy(label.runs) })
   for (const run of label.runs) writeRun(doc, run, isDisc ? '#fff' : run.ink === 'quiet' ? '#333' : '#000')
+  doc.endMarkedContent()
   doc.restore()
+}
+
+/** A label in plain characters: a fraction stands off its whole number, and a row off the one over it. */
+function saidBy(runs: PlacedLabel['runs']): string {
+  return runs.reduce((said, run, i) => {
+    if (run.kind === 'shape') return said
+    const before = runs[i - 1]
+    const isApart = before !== undefined && (run.x < before.x || (run.size < before.size && /^\d/.test(run.text)))
+    return said + (isApart && /[^\s/]$/.test(said) ? ' ' : '') + run.text.replace('⁄', '/')
+  }, '')
 }

@@ -69,9 +69,11 @@ export interface Stretch {
 const graphemes = new Intl.Segmenter('en', { granularity: 'grapheme' })
 /** What has no shape of its own: joiners, direction marks, variation selectors, controls. */
 const shapeless = /[\p{Default_Ignorable_Code_Point}\p{Cf}\p{Cc}]/gu
+/** The same without what holds one picture together, which makes one letter of several signs. */
+const loose = /(?![\u200d\ufe0f])[\p{Default_Ignorable_Code_Point}\p{Cf}\p{Cc}]/gu
 
 /** A text as it can be written: composed, on one line, without what has no shape. */
-export const tidy = (text: string): string => text.normalize('NFC').replace(/\s+/gu, ' ').replace(shapeless, '')
+export const tidy = (text: string): string => text.normalize('NFC').replace(/\s+/gu, ' ').replace(loose, '')
 
 /** A text's letters, one by one as a reader counts them. */
 export const lettersIn = (text: string): string[] => Array.from(graphemes.segment(text), ({ segment }) => segment)
@@ -84,7 +86,9 @@ export function stretchesOf(doc: Pdf, face: Face, text: string): Stretch[] {
   }
   if (has(face, text)) return text === '' ? [] : [{ file: face, text }]
   const stretches: Stretch[] = []
-  for (const letter of lettersIn(text)) {
+  for (const whole of lettersIn(text)) {
+    const letter = whole.replace(shapeless, '')
+    if (letter === '') continue
     const file = spares[face].find((spare) => has(spare, letter))
     const last = stretches.at(-1)
     const next = file ? { file, text: letter } : { file: face, text: '?' }

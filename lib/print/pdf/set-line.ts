@@ -86,7 +86,7 @@ function wrap(doc: Pdf, words: readonly Word[], width: number): Row[] {
 
 /** Parts a word that is too wide, first between its atoms, then between letters. */
 function parted(doc: Pdf, { atoms, space }: Word, width: number): Word[] {
-  const bits = atoms.flatMap((atom) => (atom.width > width + hair ? lettersOf(doc, atom) : [atom]))
+  const bits = atoms.flatMap((atom) => (atom.width > width + hair ? lettersOf(doc, shortRule(atom, width)) : [atom]))
   const words: Word[] = []
   for (const atom of bits) {
     const last = words.at(-1)
@@ -95,6 +95,12 @@ function parted(doc: Pdf, { atoms, space }: Word, width: number): Word[] {
     else words.push({ atoms: [atom], width: atom.width, space: last ? 0 : space })
   }
   return words
+}
+
+/** A blank to write on is no wider than its place. */
+function shortRule(atom: Atom, width: number): Atom {
+  const [run] = atom.runs
+  return run?.kind === 'rule' ? { runs: [{ ...run, width }], width } : atom
 }
 
 function lettersOf(doc: Pdf, atom: Atom): Atom[] {
@@ -129,15 +135,21 @@ function shortened(doc: Pdf, { atoms, width: whole }: Word, width: number): read
   return letters
 }
 
+/** Words are written with the blank after them, so that it is there for whoever searches or copies the text. */
 function drawRow(doc: Pdf, { words }: Row, x: number, y: number, colour?: string): void {
   let at = x
   words.forEach(({ atoms, space }, i) => {
     at += i > 0 ? space : 0
-    for (const { runs, width, says } of atoms) {
-      if (says) doc.markContent('Span', { actual: says })
-      for (const run of runs) writeRun(doc, { ...run, x: at + run.x, y: y + run.y }, colour)
+    atoms.forEach(({ runs, width, says }, n) => {
+      const after = n === atoms.length - 1 && (words[i + 1]?.space ?? 0) > 0 ? ' ' : ''
+      if (says) doc.markContent('Span', { actual: says + after })
+      runs.forEach((run, r) => {
+        const placed = { ...run, x: at + run.x, y: y + run.y }
+        const isEnd = r === runs.length - 1 && !says
+        writeRun(doc, placed.kind === 'text' && isEnd ? { ...placed, text: placed.text + after } : placed, colour)
+      })
       if (says) doc.endMarkedContent()
       at += width
-    }
+    })
   })
 }
