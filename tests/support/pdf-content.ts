@@ -103,9 +103,9 @@ export function readContent(source: string, fonts: ReadonlyMap<string, ReadFont 
     scn: (n) => (state = { ...state, colour: n.join(' ') }),
     BT: () => (text = same),
     Tm: (n) => (text = n as unknown as Matrix),
-    Tf: ([, points_ = 0]) => {
+    Tf: ([, given = 0]) => {
       font = fonts.get(String(values[0])) ?? null
-      size = points_
+      size = given
     },
     TJ: () => Array.isArray(values[0]) && show(values[0]),
     Tj: () => show(values),

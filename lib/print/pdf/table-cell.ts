@@ -23,8 +23,8 @@ interface Measure {
 /** Measures what stands in one cell of a table. */
 export function setCell(setup: Setup, cell: Cell, { width, style, density }: Measure): SetCell {
   const { line, under } = cell
-  const set = (words: Line | undefined, words_: Style) =>
-    words && words.length > 0 ? [setLine(setup, words, words_, { width, align: 'centre' })] : []
+  const set = (words: Line | undefined, face: Style) =>
+    words && words.length > 0 ? [setLine(setup, words, face, { width, align: 'centre' })] : []
   const lines = [...set(line, style.line), ...set(under, style.under)]
   const box = cell.box ? Math.min(density.number, width) : 0
   return {

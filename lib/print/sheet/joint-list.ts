@@ -6,13 +6,14 @@ export function jointList({ joints, parts, returns, weld }: HandrailOutputs): Li
   const around = [...joints.map(({ perimeter }) => perimeter), ...returns.map((piece) => piece.weld)]
   const filler = weld ? `; ${weld.fillerLb.toFixed(2)} lb of filler to buy` : ''
   const total = around.reduce((sum, length) => sum + length, 0)
+  // A joint and its angle stay on one row.
   const held: Line[] = [
     ...joints.map(({ included }, i): Line => [
-      `${parts[i]?.mark}–${parts[i + 1]?.mark} `,
+      `${parts[i]?.mark}–${parts[i + 1]?.mark}\u00a0`,
       { strong: `${included.toFixed(1)}°` },
     ]),
     ...returns.map(({ end }): Line => [
-      `${(end === 'bottom' ? parts[0] : parts.at(-1))?.mark}–return `,
+      `${(end === 'bottom' ? parts[0] : parts.at(-1))?.mark}–return\u00a0`,
       { strong: '90.0°' },
       ' in plan',
     ]),

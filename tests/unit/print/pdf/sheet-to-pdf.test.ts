@@ -7,8 +7,8 @@ import { readPdf } from '@/tests/support/pdf-reader'
 import { handbookRail, marksOf, sheetOfRail } from '@/tests/support/rail-sheets'
 
 const largest = 200 * 1024
-/** A twentieth of a millimetre, points. */
-const true_ = (0.05 / 25.4) * 72
+/** Of a millimetre, points. */
+const twentieth = (0.05 / 25.4) * 72
 const sizes = { letter: [612, 792], a4: [595.28, 841.89] } as const
 
 describe.each(papers)('the cut sheet on %s', (paper) => {
@@ -40,9 +40,9 @@ describe.each(papers)('the cut sheet on %s', (paper) => {
     const ruler = page && rulerOf(page)
     expect(page?.unit).toBe(1)
     expect(ruler?.level).toBe(true)
-    expect(Math.abs((ruler?.length ?? 0) - 216)).toBeLessThan(true_)
+    expect(Math.abs((ruler?.length ?? 0) - 216)).toBeLessThan(twentieth)
     expect(ruler?.ticks).toHaveLength(4)
-    for (const [inch, at] of ruler?.ticks.entries() ?? []) expect(Math.abs(at - inch * 72)).toBeLessThan(true_)
+    for (const [inch, at] of ruler?.ticks.entries() ?? []) expect(Math.abs(at - inch * 72)).toBeLessThan(twentieth)
     expect(page?.text).toContain('print check: 3 in exactly')
   })
 
@@ -50,7 +50,7 @@ describe.each(papers)('the cut sheet on %s', (paper) => {
     const { pages } = await drawn({ ...handbookRail, hand })
     const letters = pages.flatMap((page) => page.letters).filter(({ size }) => size > 60)
     expect(letters.map(({ text }) => text)).toEqual([hand])
-    expect(Math.abs((letters[0]?.top ?? 0) - 72)).toBeLessThan(true_)
+    expect(Math.abs((letters[0]?.top ?? 0) - 72)).toBeLessThan(twentieth)
     expect(pages[0]?.text).toContain('hand, going UP')
   })
 
