@@ -1,4 +1,3 @@
-import { railSheet } from '@/components/sheet/rail-sheet'
 import { sheetOf } from '@/components/sheet/sheet-of'
 import { computeCalculator } from '@/lib/calculators/compute'
 import { defaultPrecision } from '@/lib/calculators/fields'
@@ -35,15 +34,6 @@ export async function printed(id: CalculatorId, inputs: unknown, asked: Asked = 
   }
   return sheetOf(id, { ...parts, answer: computed.answer })
 }
-
-/** A cut sheet of inputs the engine has answered. */
-export const cutSheet = (answer: Parameters<typeof railSheet>[0]['answer'], asked: Asked = {}): Sheet =>
-  railSheet({
-    head: { ...blankHead, ...asked.head },
-    answer,
-    reading: reading(asked),
-    address: 'https://longpoint.example/',
-  })
 
 const pieceText = (piece: Piece): string => {
   if (typeof piece === 'string') return piece

@@ -3,7 +3,6 @@ import type { Browser, BrowserContext, Page } from 'playwright-core'
 import { expect } from 'vitest'
 
 export const widths = [390, 1440] as const
-export type Width = (typeof widths)[number]
 
 export interface Visit {
   page: Page
