@@ -16,6 +16,8 @@ function project(
       fileParallelism: !options.serial,
       testTimeout: options.testTimeout ?? 10_000,
       hookTimeout: 120_000,
+      // A busy machine may be slow; what never comes still fails.
+      expect: { poll: { timeout: 10_000 } },
     },
   }
 }
