@@ -4,7 +4,8 @@ import { useState } from 'react'
 import type { Answer } from '@/lib/calculators/answer'
 import type { AnyCalculator } from '@/lib/calculators/define'
 import type { Precision } from '@/lib/calculators/fields'
-import { Button, ButtonLink } from '../ui/button'
+import { SaveToJob } from '../job/save-to-job'
+import { Button } from '../ui/button'
 import { usePreferences } from '../ui/use-preferences'
 import { writeAddress, type RawInputs } from './address'
 import { answerText } from './answer-text'
@@ -42,13 +43,7 @@ export function CalculatorActions({ calculator, raw, answer, precision }: Calcul
   }
   return (
     <div className="actions no-print">
-      <ButtonLink
-        href={`/jobs/save${query === '' ? '?' : `${query}&`}calculator=${id}`}
-        prefetch={false}
-        variant="primary"
-      >
-        Save to a job
-      </ButtonLink>
+      {answer && <SaveToJob calculator={id} inputs={raw} />}
       <Button disabled={!answer} onClick={() => void print()}>
         Print sheet
       </Button>

@@ -14,6 +14,14 @@ let timer: ReturnType<typeof setTimeout> | undefined
 /** What was typed on a page that has been left meanwhile is none of this page's. */
 const searchNow = () => (ahead?.path === location.pathname ? ahead.search : location.search)
 
+/** Other things that the address says, such as the kept sheet that is being revised, stay. */
+function withOthers(fields: Fields, search: string, written: string): string {
+  const others = [...new URLSearchParams(search)].filter(([name]) => !Object.hasOwn(fields, name))
+  const rest = new URLSearchParams(others).toString()
+  if (rest === '') return written
+  return written === '' ? `?${rest}` : `${written}&${rest}`
+}
+
 function settle(): void {
   clearTimeout(timer)
   if (ahead?.path === location.pathname)
@@ -55,7 +63,10 @@ export function useAddressInputs(fields: Fields, example: RawInputs): [RawInputs
   const search = useSyncExternalStore(subscribe, searchNow, () => '')
   const raw = useMemo(() => readAddress(fields, search, example), [fields, search, example])
   const set = useCallback(
-    (changed: RawInputs) => change(writeAddress(fields, { ...readAddress(fields, searchNow(), example), ...changed })),
+    (changed: RawInputs) => {
+      const search = searchNow()
+      change(withOthers(fields, search, writeAddress(fields, { ...readAddress(fields, search, example), ...changed })))
+    },
     [fields, example],
   )
   return [raw, set]

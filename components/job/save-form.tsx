@@ -24,8 +24,14 @@ interface Typed extends SheetHead {
   newJob: string
 }
 
+interface SaveFormProps extends Saving {
+  /** Job to offer first. */
+  jobId?: string
+  onClose: () => void
+}
+
 /** Which job, and what stands at the head of the sheet; then the sheet is saved and shown. */
-export function SaveForm({ calculator, inputs, jobId, onClose }: Saving & { onClose: () => void }) {
+export function SaveForm({ calculator, inputs, jobId, onClose }: SaveFormProps) {
   const router = useRouter()
   const client = useQueryClient()
   const id = useId()

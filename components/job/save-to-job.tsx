@@ -1,52 +1,39 @@
 'use client'
 
-import Link from 'next/link'
-import { useRef } from 'react'
+import { useState, type ComponentType } from 'react'
 import { Button } from '@/components/ui/button'
-import { useMe } from '@/components/ui/me'
-import { QueryProvider } from './query-provider'
-import { SaveForm } from './save-form'
+import type { SaveDialogProps } from './save-dialog'
 import type { Saving } from './saving'
+import { useSheetPlace } from './use-sheet-place'
 
-/** Opens the dialog that keeps a cut sheet in a job; signed out, says where to sign in and comes back here. */
+/**
+ * Keeps a measure in a job, or as the next revision of the sheet that the page was opened for. The dialog brings forms
+ * and lists along: it is fetched when it is asked for.
+ */
 export function SaveToJob(saving: Saving) {
-  const dialog = useRef<HTMLDialogElement>(null)
-  const me = useMe()
-  const close = () => dialog.current?.close()
+  const [Dialog, setDialog] = useState<ComponentType<SaveDialogProps> | null>(null)
+  const [said, setSaid] = useState('')
+  const place = useSheetPlace()
+  const title = place?.sheet === undefined ? 'Save to a job' : 'Save as a revision'
+  const open = async () => {
+    setSaid('Opening the job book…')
+    try {
+      const { SaveDialog } = await import('./save-dialog')
+      setDialog(() => SaveDialog)
+      setSaid('')
+    } catch {
+      setSaid('The job book did not open: no connection. Your numbers stay in the address of this page.')
+    }
+  }
   return (
     <>
-      <Button variant="primary" onClick={() => dialog.current?.showModal()} aria-haspopup="dialog">
-        Save to a job
+      <Button variant="primary" onClick={() => void open()} aria-haspopup="dialog">
+        {title}
       </Button>
-      <dialog ref={dialog} className="sheet-dialog" aria-labelledby="save-title">
-        <h2 id="save-title" className="mb-4 text-3xl">
-          Save to a job
-        </h2>
-        {me?.role === 'journeyman' && (
-          <QueryProvider>
-            <SaveForm {...saving} onClose={close} />
-          </QueryProvider>
-        )}
-        {me?.role !== 'journeyman' && <NotHere signedIn={Boolean(me)} onClose={close} />}
-      </dialog>
-    </>
-  )
-}
-
-function NotHere({ signedIn, onClose }: { signedIn: boolean; onClose: () => void }) {
-  const from = typeof window === 'undefined' ? '/jobs' : `${window.location.pathname}${window.location.search}`
-  const back = `?from=${encodeURIComponent(from)}`
-  return (
-    <>
-      {signedIn ? (
-        <p className="mb-5">Journeymen keep a job book. Your sign-in does not; you can print the sheet all the same.</p>
-      ) : (
-        <p className="mb-5">
-          Cut sheets are kept in a job book. <Link href={`/sign-in${back}`}>Sign in</Link> or{' '}
-          <Link href={`/start${back}`}>start a job book</Link>; your numbers stay in the address and come back with you.
-        </p>
-      )}
-      <Button onClick={onClose}>Close</Button>
+      {Dialog && <Dialog {...saving} title={title} place={place} onClose={() => setDialog(null)} />}
+      <p role="status" className="order-last basis-full text-mute empty:hidden">
+        {said}
+      </p>
     </>
   )
 }

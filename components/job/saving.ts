@@ -3,6 +3,4 @@ export interface Saving {
   calculator: string
   /** As typed or as numbers: the server reads and computes them again. */
   inputs: Record<string, unknown>
-  /** Job to offer first. */
-  jobId?: string
 }

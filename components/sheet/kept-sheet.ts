@@ -4,7 +4,8 @@ import type { Sheet } from '@/lib/print/sheet/sheet'
 import type { Preferences } from '@/lib/schemas/account'
 import { precisionOf } from '@/lib/schemas/precision'
 import type { SheetView } from '@/lib/schemas/views'
-import { sheetOf } from './sheet-of'
+import { revisingQuery } from '../job/sheet-place'
+import { handbookPath, sheetOf } from './sheet-of'
 
 /**
  * The printable sheet of a revision kept in a job, read as its reader reads. Its address is that of the current
@@ -24,4 +25,11 @@ export async function keptSheet(view: SheetView, preferences: Preferences, origi
     reading: { precision: precisionOf(preferences), preferences },
     address: `${origin}/jobs/${jobId}/sheets/${sheet}`,
   })
+}
+
+/** Where the measure of a kept revision is opened to be revised. */
+export async function revisePath({ calculator, inputs, jobId: job, sheet, revision }: SheetView): Promise<string> {
+  if (!isCalculatorId(calculator)) return '/handbook'
+  const path = await handbookPath(calculator, inputs)
+  return `${path}${path.includes('?') ? '&' : '?'}${revisingQuery({ job, sheet, revision })}`
 }

@@ -1,6 +1,6 @@
 import { queryOptions } from '@tanstack/react-query'
 import type { SheetForm, SheetRevisionForm } from '@/lib/schemas/job'
-import type { RevisionLine, SheetView } from '@/lib/schemas/views'
+import type { SheetView } from '@/lib/schemas/views'
 import { send } from './send'
 
 interface Place {
@@ -11,20 +11,12 @@ interface Place {
 const pathOf = (jobId: string, sheet?: number) =>
   `/api/jobs/${encodeURIComponent(jobId)}/sheets${sheet === undefined ? '' : `/${sheet}`}`
 
-/** One revision of a cut sheet, the current one unless named. */
-export function sheetQuery(jobId: string, sheet: number, revision?: number) {
-  const asked = revision === undefined ? '' : `?revision=${revision}`
+/** The revision that was opened to be revised. It never changes: what others save is another one. */
+export function openedQuery({ job, sheet, revision }: { job: string; sheet: number; revision: number }) {
   return queryOptions({
-    queryKey: ['jobs', jobId, 'sheets', sheet, revision ?? 'current'],
-    queryFn: ({ signal }) => send<SheetView>('GET', `${pathOf(jobId, sheet)}${asked}`, { signal }),
-  })
-}
-
-/** All revisions of a cut sheet, newest first. */
-export function revisionsQuery(jobId: string, sheet: number) {
-  return queryOptions({
-    queryKey: ['jobs', jobId, 'sheets', sheet, 'revisions'],
-    queryFn: ({ signal }) => send<RevisionLine[]>('GET', `${pathOf(jobId, sheet)}/revisions`, { signal }),
+    queryKey: ['jobs', job, 'sheets', sheet, revision],
+    queryFn: ({ signal }) => send<SheetView>('GET', `${pathOf(job, sheet)}?revision=${revision}`, { signal }),
+    staleTime: Infinity,
   })
 }
 

@@ -23,8 +23,6 @@ interface HandrailScreenProps {
   /** The sheet to work on; left out, the one of the handbook's page. */
   store?: MeasureStore
   typeset: Typeset
-  /** What saves this measure, where not the plain act does. */
-  actions?: ReactNode
   /** Ways on. */
   aside?: ReactNode
   /** Sources and proof, which do not change with the numbers. */
@@ -42,7 +40,7 @@ export function HandrailScreen({ store = pageStore, ...rest }: HandrailScreenPro
   )
 }
 
-function Bench({ store, typeset, actions, aside, children }: HandrailScreenProps & { store: MeasureStore }) {
+function Bench({ store, typeset, aside, children }: HandrailScreenProps & { store: MeasureStore }) {
   const state = useHandrail(store)
   const { calculator, rail, answer, stale, precision, preferences, cautions } = state
   const faults = placedFaults(state.measure, state.faults)
@@ -69,7 +67,7 @@ function Bench({ store, typeset, actions, aside, children }: HandrailScreenProps
               </Suspense>
             )}
           </div>
-          <RailActions state={state} actions={actions} />
+          <RailActions state={state} />
           {rail && <RailResultsLater state={state} rail={rail} />}
           {alone.map(({ signal, text }) => (
             <CautionPanel key={text} signal={signal}>

@@ -1,27 +1,19 @@
 'use client'
 
-import { lazy, Suspense, useState, type ReactNode } from 'react'
+import { useState } from 'react'
+import { SaveToJob } from '../../job/save-to-job'
 import { Button, ButtonLink } from '../../ui/button'
 import { untilAwake } from './awake'
 import { measureQuery } from './measure-address'
 import { mirrorHand } from './measure-edits'
 import type { HandrailState } from './use-handrail'
 
-/** Keeping a sheet brings forms and queries along: fetched once there is a measure to keep. */
-const SaveToJob = lazy(async () => ({ default: (await import('../../job/save-to-job')).SaveToJob }))
-
 /** Fetched when somebody stirs, so that it is there when the network is not. */
 const plainText = () => import('./plain-text')
 if (typeof window !== 'undefined') void untilAwake().then(plainText)
 
-interface RailActionsProps {
-  state: HandrailState
-  /** Stands in for saving where a sheet that is already kept is being revised. */
-  actions?: ReactNode
-}
-
 /** Print the cut sheet, keep it in a job, copy it as text. Numbers left from before are not handed on. */
-export function RailActions({ state, actions }: RailActionsProps) {
+export function RailActions({ state }: { state: HandrailState }) {
   const { store, raw, rail, stale, measure, precision, preferences, origin } = state
   const [said, setSaid] = useState('')
   const copy = async () => {
@@ -39,12 +31,7 @@ export function RailActions({ state, actions }: RailActionsProps) {
     return <p className="rail-actions-wait">Print, save and copy stand here as soon as the measures are whole.</p>
   return (
     <div className="actions rail-actions no-print">
-      {actions ??
-        (origin === 'own' && (
-          <Suspense fallback={<Button disabled>Save to a job</Button>}>
-            <SaveToJob calculator="handrail" inputs={raw} />
-          </Suspense>
-        ))}
+      {origin === 'own' && <SaveToJob calculator="handrail" inputs={raw} />}
       <ButtonLink href={`/handbook/handrail/sheet${measureQuery(measure)}`} prefetch={false}>
         Print cut sheet
       </ButtonLink>

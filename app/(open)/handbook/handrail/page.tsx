@@ -1,6 +1,6 @@
 import type { Metadata } from 'next'
 import Link from 'next/link'
-import { HandrailScreen } from '@/components/calculator/handrail/handrail-screen'
+import { HandrailAtWork } from '@/components/calculator/handrail/handrail-at-work'
 import { NeedsScripts } from '@/components/calculator/needs-scripts'
 import { Proof } from '@/components/calculator/proof'
 import { sharedInputs } from '@/components/calculator/related'
@@ -42,13 +42,13 @@ export default async function HandrailPage() {
         </Link>
       </p>
       <NeedsScripts />
-      <HandrailScreen
+      <HandrailAtWork
         typeset={typesetAhead(calculator)}
         aside={<RelatedLinks related={related} fields={calculator.inputs} raw={{}} />}
       >
         <Sources sources={handrail.sources} basis={handrail.basis} />
         <Proof rows={proof} outputs={handrail.outputs} />
-      </HandrailScreen>
+      </HandrailAtWork>
     </article>
   )
 }

@@ -26,7 +26,7 @@ afterEach(() => {
 })
 
 function open(store = measureStore(measureFromInputs(handrail.example))) {
-  render(<HandrailScreen store={store} typeset={{}} actions={<span>kept elsewhere</span>} />)
+  render(<HandrailScreen store={store} typeset={{}} />)
   return store
 }
 
@@ -148,9 +148,9 @@ describe('what is kept', () => {
     expect(box('railHeight').value).toBe('34 1/2')
   })
 
-  it('opens a saved sheet over its own numbers, and leaves draft and sheet number alone', () => {
+  it('opens a saved sheet over its own numbers, and leaves draft and sheet number alone', async () => {
     localStorage.setItem(draftKey, 'r~L~30!t~1~2')
-    history.replaceState(null, '', `${page}?job=7&sheet=2`)
+    history.replaceState(null, '', `${page}?job=7&sheet=2&revision=1`)
     vi.useFakeTimers()
     open(savedStore({ ...handrail.example, railHeight: 37.5 }))
     expect(box('railHeight').value).toBe('37.5')
@@ -159,7 +159,7 @@ describe('what is kept', () => {
     vi.useRealTimers()
     expect(new URLSearchParams(location.search).get('sheet')).toBe('2')
     expect(localStorage.getItem(draftKey)).toBe('r~L~30!t~1~2')
-    expect(screen.getByText('kept elsewhere')).toBeDefined()
+    expect(await screen.findByRole('button', { name: 'Save as a revision' }, { timeout: 5000 })).toBeDefined()
   })
 })
 
