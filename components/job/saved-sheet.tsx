@@ -36,7 +36,7 @@ export function SavedSheet({ view, revisions, paper, revisePath }: SavedSheetPro
         <h1>{view.name}</h1>
         <p className="lede">
           Sheet {view.sheet}, revision {view.revision}
-          {view.note && `: ${view.note}`}. Saved by {view.createdBy}, {dayInWords(view.createdAt)}.
+          {view.note && `: ${view.note.replace(/\.$/, '')}`}. Saved by {view.createdBy}, {dayInWords(view.createdAt)}.
         </p>
         {!current && <Superseded path={path} by={view.currentRevision} />}
         <SheetActs view={view} path={path} revisePath={current ? revisePath : null} />

@@ -1,11 +1,13 @@
 'use client'
 
 import { useMemo, useState } from 'react'
-import { answer } from '@/lib/calculators/answer'
+import { answer as answerOf, type Answer } from '@/lib/calculators/answer'
 import { asAny } from '@/lib/calculators/define'
 import { handrail } from '@/lib/calculators/field/handrail'
-import { blankHead } from '@/lib/print/sheet/sheet'
+import { blankHead, type SheetReading } from '@/lib/print/sheet/sheet'
+import type { Preferences } from '@/lib/schemas/account'
 import { precisionOf } from '@/lib/schemas/precision'
+import type { RawInputs } from '../calculator/address'
 import type { Measure } from '../calculator/handrail/measure'
 import { inputsOf } from '../calculator/handrail/measure-inputs'
 import { ButtonLink } from '../ui/button'
@@ -13,50 +15,51 @@ import { ProblemState } from '../ui/states'
 import { usePreferences } from '../ui/use-preferences'
 import { HeadFields } from './head-fields'
 import { PrintActions } from './print-actions'
-import { railPath, railSheet } from './rail-sheet'
+import { railPath, railSheet, railSketches } from './rail-sheet'
 import { SheetPaper } from './sheet-paper'
 
 const calculator = asAny(handrail)
 
 /** The cut sheet of a measure, or what is off in it. */
 export function MeasuredSheet({ measure }: { measure: Measure }) {
-  const inputs = useMemo(() => inputsOf(measure), [measure])
   const preferences = usePreferences()
+  const inputs = useMemo(() => inputsOf(measure), [measure])
+  const reading = useMemo(() => ({ precision: precisionOf(preferences), preferences }), [preferences])
+  const answered = useMemo(() => answerOf(calculator, inputs, reading.precision), [inputs, reading])
+  if (answered.ok) return <Printable {...{ inputs, reading }} answer={answered.answer} />
+  const mend = (
+    <ButtonLink href={railPath(inputs)} prefetch={false}>
+      Mend the measure
+    </ButtonLink>
+  )
+  return (
+    <ProblemState title="These measures make no rail yet" action={mend}>
+      <ul>
+        {answered.errors.map(({ field, message }) => (
+          <li key={`${field} ${message}`}>{message}</li>
+        ))}
+      </ul>
+    </ProblemState>
+  )
+}
+
+interface PrintableProps {
+  inputs: RawInputs
+  answer: Answer
+  reading: SheetReading & { preferences: Preferences }
+}
+
+function Printable({ inputs, answer, reading }: PrintableProps) {
   const [head, setHead] = useState(blankHead)
-  const precision = precisionOf(preferences)
-  const answered = useMemo(() => answer(calculator, inputs, precisionOf(preferences)), [inputs, preferences])
+  const sketches = useMemo(() => railSketches({ answer, reading }), [answer, reading])
   const back = railPath(inputs)
-  if (!answered.ok)
-    return (
-      <ProblemState
-        title="These measures make no rail yet"
-        action={
-          <ButtonLink href={back} prefetch={false}>
-            Mend the measure
-          </ButtonLink>
-        }
-      >
-        <ul>
-          {answered.errors.map(({ field, message }) => (
-            <li key={`${field} ${message}`}>{message}</li>
-          ))}
-        </ul>
-      </ProblemState>
-    )
-  const sheet = railSheet({
-    head,
-    answer: answered.answer,
-    reading: { precision, preferences },
-    address: `${location.origin}${back}`,
-  })
+  const { precision, preferences } = reading
+  const { units, sawSquare } = preferences
   return (
     <>
-      <PrintActions
-        ask={{ inputs, precision, units: preferences.units, sawSquare: preferences.sawSquare, head }}
-        back={back}
-      />
+      <PrintActions ask={{ inputs, precision, units, sawSquare, head }} back={back} />
       <HeadFields head={head} onChange={setHead} />
-      <SheetPaper sheet={sheet} />
+      <SheetPaper sheet={railSheet({ head, answer, reading, address: `${location.origin}${back}` }, sketches)} />
     </>
   )
 }

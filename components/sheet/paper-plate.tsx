@@ -1,20 +1,29 @@
-import { compose, type Viewport } from '@/lib/drawing/compose'
+import { memo } from 'react'
+import { compose } from '@/lib/drawing/compose'
 import type { Sketch } from '@/lib/drawing/sketch'
+import { pictureViewport, stripViewport } from '@/lib/print/sheet/picture-room'
 import { PlateLabels } from '../drawing/plate-labels'
 import { PlateMarks } from '../drawing/plate-marks'
+import { viewportFor } from '../drawing/plate-viewport'
 import styles from '../drawing/plate.module.css'
 
 interface PaperPlateProps {
   sketch: Sketch
   title: string
-  viewport: Viewport
+  /** A number is the printed page with so many px of room. */
+  on: number | 'desk' | 'phone' | 'strip'
 }
 
-/** A drawing composed once for paper: black on white, of one size however wide the screen is. */
-export function PaperPlate({ sketch, title, viewport }: PaperPlateProps) {
-  const plate = compose(sketch, viewport)
+function viewportOf(on: PaperPlateProps['on']) {
+  if (on === 'strip') return stripViewport
+  return on === 'phone' ? viewportFor(340, 'plate') : pictureViewport(on === 'desk' ? 400 : on)
+}
+
+/** A drawing composed once for its paper, black on white. Composing takes a moment: it is done anew only for another drawing. */
+export const PaperPlate = memo(function PaperPlate({ sketch, title, on }: PaperPlateProps) {
+  const plate = compose(sketch, viewportOf(on))
   return (
-    <div className={`${styles.frame} ${styles.paper} printed-plate`}>
+    <div className={`${styles.frame} ${styles.paper} printed-plate`} data-on={typeof on === 'number' ? 'print' : on}>
       <svg
         className={styles.svg}
         viewBox={`0 0 ${plate.width} ${Math.round(plate.height)}`}
@@ -26,4 +35,4 @@ export function PaperPlate({ sketch, title, viewport }: PaperPlateProps) {
       </svg>
     </div>
   )
-}
+})

@@ -16,16 +16,20 @@ export interface SheetOfAnswer {
   address: string
 }
 
-/** The cut sheet of a rail with its drawings. */
-export function railSheet({ head, answer, reading, address }: SheetOfAnswer): Sheet {
+/** The drawings of a rail on its sheet: in elevation, and the sticks where stock was given. */
+export function railSketches({ answer, reading }: Pick<SheetOfAnswer, 'answer' | 'reading'>) {
   const given = answer.inputs as unknown as HandrailInputs
   const solved = answer.outputs as unknown as HandrailOutputs
   const show = { ...reading.precision, metric: reading.preferences.units === 'mm', detail: 'full' as const }
-  return cutSheetOf({
-    ...{ head, given, solved, reading, address },
-    elevation: draw(given, solved, show),
-    sticks: drawSticks(given, solved, show),
-  })
+  return { elevation: draw(given, solved, show), sticks: drawSticks(given, solved, show) }
+}
+
+/** The cut sheet of a rail with its drawings, which may have been made before. */
+export function railSheet(parts: SheetOfAnswer, sketches = railSketches(parts)): Sheet {
+  const { answer, ...rest } = parts
+  const given = answer.inputs as unknown as HandrailInputs
+  const solved = answer.outputs as unknown as HandrailOutputs
+  return cutSheetOf({ ...rest, given, solved, ...sketches })
 }
 
 /** Path of the handbook's page with this measure on it. */

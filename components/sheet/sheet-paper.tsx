@@ -1,4 +1,4 @@
-import { pictureRoom, pictureViewport, stripViewport } from '@/lib/print/sheet/picture-room'
+import { pictureRoom } from '@/lib/print/sheet/picture-room'
 import type { Block, Sheet, SheetReading } from '@/lib/print/sheet/sheet'
 import { PaperPlate } from './paper-plate'
 import { Pieces } from './pieces'
@@ -65,15 +65,15 @@ function SheetTop({ sheet: { title, under, particulars, hand, reading } }: { she
 
 function SheetBlock({ block, reading, room }: { block: Block; reading: SheetReading; room: number }) {
   switch (block.kind) {
-    case 'picture': {
-      const viewport = block.as === 'strip' ? stripViewport : pictureViewport(room)
+    case 'picture':
       return (
         <figure className="printed-picture">
           {block.says && <figcaption>{block.says}</figcaption>}
-          <PaperPlate sketch={block.sketch} title={block.title} viewport={viewport} />
+          {(block.as === 'strip' ? (['strip'] as const) : ([room, 'desk', 'phone'] as const)).map((on) => (
+            <PaperPlate key={on} sketch={block.sketch} title={block.title} on={on} />
+          ))}
         </figure>
       )
-    }
     case 'table':
       return <SheetTable table={block} reading={reading} />
     case 'lists':

@@ -9,7 +9,7 @@ export function jointList({ joints, parts, returns, weld }: HandrailOutputs): Li
   // A joint and its angle stay on one row.
   const held: Line[] = [
     ...joints.map(({ included }, i): Line => [
-      `${parts[i]?.mark}–${parts[i + 1]?.mark}\u00a0`,
+      `${parts[i]?.mark}–\u2060${parts[i + 1]?.mark}\u00a0`,
       { strong: `${included.toFixed(1)}°` },
     ]),
     ...returns.map(({ end }): Line => [

@@ -9,13 +9,13 @@ export const stripViewport: Viewport = { ...onPaper, height: 160, trim: true }
 export const pictureViewport = (height: number): Viewport => ({ ...onPaper, height })
 
 // Heights on paper at 96 px an inch, as the sheet's style sets them.
-const page = 1012
+const page = 994
 const headAndFoot = 290
 const tableHead = 64
 const tableRow = 40
 const listHead = 34
 const symbol = 26
-const lineOfText = 18
+const lineOfText = 19
 const listRow = 7
 const caption = 40
 const remark = 26
