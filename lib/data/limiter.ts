@@ -17,7 +17,8 @@ export interface Limit {
 class DatabaseLimiter extends RateLimiterMySQL {
   constructor({ name, points, seconds }: Limit) {
     const store = { storeClient: sequelize, storeType: 'sequelize', tableName: 'rate_limits', tableCreated: true }
-    super({ ...store, keyPrefix: name, points, duration: seconds })
+    // The library would sweep with a statement of its own, which our pool cannot read, and keep the connection.
+    super({ ...store, keyPrefix: name, points, duration: seconds, clearExpiredByTimeout: false })
   }
 
   async _upsert(key: string, points: number, durationMs: number, overwrite = false) {
