@@ -14,14 +14,9 @@ export function SheetPaper({ sheet }: { sheet: Sheet }) {
   return (
     <article className="printed" aria-label="Sheet" data-superseded={supersededBy ?? undefined}>
       {supersededBy !== undefined && (
-        <>
-          <p className="printed-superseded">
-            Superseded: revision {supersededBy} stands in its place. Do not cut from this sheet.
-          </p>
-          <span className="printed-over" aria-hidden="true">
-            superseded
-          </span>
-        </>
+        <p className="printed-superseded">
+          Superseded: revision {supersededBy} stands in its place. Do not cut from this sheet.
+        </p>
       )}
       <SheetTop sheet={sheet} />
       <ul className="printed-facts">
