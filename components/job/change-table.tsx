@@ -1,4 +1,5 @@
 import type { Precision } from '@/lib/calculators/fields'
+import './change-table.css'
 import { readsAs, type Change, type Leaf } from './compare'
 
 function difference({ before, after }: Change): string {
@@ -21,28 +22,33 @@ export function ChangeTable({
 }) {
   if (changes.length === 0) return <p>Nothing differs.</p>
   return (
-    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label={caption}>
-      <table className="w-full max-w-[60rem] border-collapse text-left [&_td]:font-mono [&_td,&_th]:border-b [&_td,&_th]:border-rule [&_td,&_th]:px-2 [&_td,&_th]:py-2 [&_td]:whitespace-nowrap [&_tbody_th]:font-normal">
-        <caption className="sr-only">{caption}</caption>
-        <thead>
-          <tr>
-            <th scope="col">What</th>
-            <th scope="col">Was</th>
-            <th scope="col">Is</th>
-            <th scope="col">By</th>
-          </tr>
-        </thead>
-        <tbody>
-          {changes.map((change) => (
-            <tr key={change.path}>
-              <th scope="row">{change.label}</th>
-              <td>{text(change.before, precision)}</td>
-              <td>{text(change.after, precision)}</td>
-              <td>{difference(change)}</td>
-            </tr>
+    <table role="table" className="change-table">
+      <caption className="sr-only">{caption}</caption>
+      <thead role="rowgroup">
+        <tr role="row">
+          {['What', 'Was', 'Is', 'By'].map((head) => (
+            <th key={head} role="columnheader" scope="col">
+              {head}
+            </th>
           ))}
-        </tbody>
-      </table>
-    </div>
+        </tr>
+      </thead>
+      <tbody role="rowgroup">
+        {changes.map((change) => (
+          <tr key={change.path} role="row">
+            <th role="rowheader" scope="row">
+              {change.label}
+            </th>
+            <td role="cell" data-head="was">
+              {text(change.before, precision)}
+            </td>
+            <td role="cell" data-head="is">
+              {text(change.after, precision)}
+            </td>
+            <td role="cell">{difference(change)}</td>
+          </tr>
+        ))}
+      </tbody>
+    </table>
   )
 }
