@@ -48,6 +48,14 @@ describe('the bench', () => {
     expect(answer()).toContain('12°')
   })
 
+  it('leaves alone what else the address says, such as the sheet that is being revised', async () => {
+    const { below, user } = await open('?slopeBelow=20&job=7&sheet=2&revision=1')
+    await user.clear(below)
+    await user.type(below, '24')
+    await expect.poll(() => addressSays('slopeBelow')).toBe('24')
+    expect([addressSays('job'), addressSays('sheet'), addressSays('revision')]).toEqual(['7', '2', '1'])
+  })
+
   it('keeps what was typed, and the last answer, beside the sentence on what is off', async () => {
     const { below, user } = await open('?slopeBelow=20')
     await user.clear(below)
