@@ -16,6 +16,8 @@ function project(
       fileParallelism: !options.serial,
       testTimeout: options.testTimeout ?? 10_000,
       hookTimeout: 120_000,
+      // Pages are looked at two at once, as a small machine has cores.
+      maxConcurrency: 2,
       // A busy machine may be slow; what never comes still fails.
       expect: { poll: { timeout: 10_000 } },
     },
@@ -28,7 +30,8 @@ export default defineConfig({
       project('unit'),
       project('proof'),
       project('api', { serial: true, testTimeout: 20_000 }),
-      project('browser', { serial: true, testTimeout: 120_000 }),
+      // Run alone each file starts and builds the app itself; under `npm test` all come to the one that stands.
+      project('browser', { serial: !process.env.TEST_APP_URL, testTimeout: 120_000 }),
       project('faults', { serial: true, testTimeout: 300_000 }),
     ],
   },

@@ -1,27 +1,16 @@
-import type { Browser, Page } from 'playwright-core'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { openBrowser } from '@/tests/support/browser'
-import { servedApp, type ServedApp } from '@/tests/support/server'
-import { expectClean, visit, widths } from '@/tests/support/visit'
+import type { Page } from 'playwright-core'
+import { describe, expect, it } from 'vitest'
+import { browsing } from '@/tests/support/browsing'
+import { expectClean, widths } from '@/tests/support/visit'
 
-let app: ServedApp
-let browser: Browser
-
-beforeAll(async () => {
-  app = await servedApp()
-  browser = await openBrowser()
-})
-afterAll(async () => {
-  await browser?.close()
-  await app?.stop()
-})
+const { visit } = browsing()
 
 /** What the page says, with stacked fractions read as text. */
 const says = (page: Page) => page.locator('main').innerText()
 
 describe('a calculator at the desk', () => {
   it('answers as it is typed, keeps the numbers in the address, and brings them back', async () => {
-    const visited = await visit(browser, app.url, 1440)
+    const visited = await visit(1440)
     const { page } = visited
     await page.goto('/handbook/pitch')
     await page.getByRole('textbox', { name: 'Rise', exact: true }).fill('7 1/4')
@@ -38,7 +27,7 @@ describe('a calculator at the desk', () => {
   })
 
   it('says at the field what is off, and loses nothing', async () => {
-    const visited = await visit(browser, app.url, 1440)
+    const visited = await visit(1440)
     const { page } = visited
     await page.goto('/handbook/miter')
     const field = page.getByRole('textbox', { name: 'Slope below the knuckle' })
@@ -52,7 +41,7 @@ describe('a calculator at the desk', () => {
   })
 
   it('is worked by keyboard alone', async () => {
-    const visited = await visit(browser, app.url, 1440)
+    const visited = await visit(1440)
     const { page } = visited
     await page.goto('/handbook/miter')
     await page.getByRole('textbox', { name: 'Slope below the knuckle' }).focus()
@@ -70,7 +59,7 @@ const CSS_escape = (id: string | null) => (id ?? '').split(' ')[0]?.replace(/[^\
 
 describe.each(widths)('the front page at %d px', (width) => {
   it('has a working calculator on it', async () => {
-    const visited = await visit(browser, app.url, width)
+    const visited = await visit(width)
     const { page } = visited
     await page.goto('/')
     expect(await page.locator('main svg[role=img]').count()).toBeGreaterThan(0)

@@ -1,24 +1,13 @@
-import type { Browser, Page } from 'playwright-core'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { openBrowser } from '@/tests/support/browser'
+import type { Page } from 'playwright-core'
+import { describe, expect, it } from 'vitest'
+import { browsing } from '@/tests/support/browsing'
 import { box, takeMeasure } from '@/tests/support/field-sheet'
 import { readPdf } from '@/tests/support/pdf-reader'
-import { servedApp, type ServedApp } from '@/tests/support/server'
-import { expectClean, signIn, visit, widths } from '@/tests/support/visit'
+import { expectClean, signIn, widths } from '@/tests/support/visit'
 
 const journeyman = ['renna@quarrylane.example', 'copper kettle under rain'] as const
 
-let app: ServedApp
-let browser: Browser
-
-beforeAll(async () => {
-  app = await servedApp()
-  browser = await openBrowser()
-})
-afterAll(async () => {
-  await browser?.close()
-  await app?.stop()
-})
+const { visit } = browsing()
 
 const dialog = (page: Page) => page.getByRole('dialog', { name: /^Save/ })
 const main = (page: Page) => page.locator('main').innerText()
@@ -47,7 +36,7 @@ async function revise(page: Page, landing: string, note: string): Promise<void> 
 
 describe.each(widths)('a cut sheet in the job book at %d px', (width) => {
   it('is saved, reopened, revised, compared, and the old one is superseded', async () => {
-    const visited = await visit(browser, app.url, width)
+    const visited = await visit(width)
     const { page } = visited
     await signIn(visited, ...journeyman)
     const address = await keepSheet(page, `Quarry Street walk-up ${width}`)
@@ -83,7 +72,7 @@ describe.each(widths)('a cut sheet in the job book at %d px', (width) => {
 
 describe('two who revise one sheet', () => {
   it('lose nothing: the later one is told, keeps what was typed, and may save after', async () => {
-    const visited = await visit(browser, app.url, 1440)
+    const visited = await visit(1440)
     const { page } = visited
     await signIn(visited, ...journeyman)
     const address = await keepSheet(page, 'Two at once')
@@ -108,7 +97,7 @@ describe('two who revise one sheet', () => {
 
 describe('who may keep a sheet', () => {
   it('a stranger is led to sign in, and comes back to the numbers', async () => {
-    const visited = await visit(browser, app.url, 390)
+    const visited = await visit(390)
     const { page } = visited
     await page.goto('/handbook/pitch?rise=7&run=11')
     await page.getByRole('button', { name: 'Save to a job' }).click()
@@ -123,7 +112,7 @@ describe('who may keep a sheet', () => {
   })
 
   it('an apprentice is told that journeymen keep a job book', async () => {
-    const visited = await visit(browser, app.url, 1440)
+    const visited = await visit(1440)
     const { page } = visited
     await page.goto('/sign-in?from=%2Fhandbook%2Fmiter')
     await page.getByLabel('E-mail').fill('ilse@quarrylane.example')

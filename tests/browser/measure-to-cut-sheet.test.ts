@@ -1,22 +1,11 @@
-import type { Browser, Page } from 'playwright-core'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { openBrowser } from '@/tests/support/browser'
+import type { Page } from 'playwright-core'
+import { describe, expect, it } from 'vitest'
+import { browsing } from '@/tests/support/browsing'
 import { takeMeasure } from '@/tests/support/field-sheet'
 import { readPdf } from '@/tests/support/pdf-reader'
-import { servedApp, type ServedApp } from '@/tests/support/server'
-import { expectClean, visit, widths } from '@/tests/support/visit'
+import { expectClean, widths } from '@/tests/support/visit'
 
-let app: ServedApp
-let browser: Browser
-
-beforeAll(async () => {
-  app = await servedApp()
-  browser = await openBrowser()
-})
-afterAll(async () => {
-  await browser?.close()
-  await app?.stop()
-})
+const { visit } = browsing()
 
 /** The rows of a table with their cells, fractions read as text. */
 const rows = (page: Page, table: string) =>
@@ -33,7 +22,7 @@ async function printedPages(page: Page, format: 'Letter' | 'A4'): Promise<number
 
 describe.each(widths)('from a field measure to a cut sheet at %d px, without signing in', (width) => {
   it('draws the rail, names each cut, and prints one page', async () => {
-    const visited = await visit(browser, app.url, width)
+    const visited = await visit(width)
     const { page, context } = visited
     await page.goto('/handbook/handrail')
     await takeMeasure(page)
@@ -78,7 +67,7 @@ describe.each(widths)('from a field measure to a cut sheet at %d px, without sig
 
 describe('the cut sheet’s own page', () => {
   it('says where to begin when it is opened without a measure', async () => {
-    const visited = await visit(browser, app.url, 390)
+    const visited = await visit(390)
     await visited.page.goto('/handbook/handrail/sheet')
     await visited.page.getByRole('link', { name: 'Give a measure' }).waitFor()
     await expectClean(visited)
@@ -86,7 +75,7 @@ describe('the cut sheet’s own page', () => {
   })
 
   it('says which measures are off, and leads back to them', async () => {
-    const visited = await visit(browser, app.url, 1440)
+    const visited = await visit(1440)
     const { page } = visited
     await page.goto('/handbook/handrail/sheet?m=r~L~36!s~round~1.66!b~none!t~35~steep!u~none')
     await page.getByRole('link', { name: 'Mend the measure' }).waitFor()

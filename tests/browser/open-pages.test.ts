@@ -1,21 +1,9 @@
-import type { Browser } from 'playwright-core'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+import { describe, expect, it } from 'vitest'
 import { calculatorIds } from '@/lib/calculators/load'
-import { openBrowser } from '@/tests/support/browser'
-import { servedApp, type ServedApp } from '@/tests/support/server'
-import { expectClean, visit, widths } from '@/tests/support/visit'
+import { browsing } from '@/tests/support/browsing'
+import { expectClean, widths } from '@/tests/support/visit'
 
-let app: ServedApp
-let browser: Browser
-
-beforeAll(async () => {
-  app = await servedApp()
-  browser = await openBrowser()
-})
-afterAll(async () => {
-  await browser?.close()
-  await app?.stop()
-})
+const { visit, visitWithoutScripts, host } = browsing()
 
 const pages = [
   '/',
@@ -33,8 +21,8 @@ const rounds = pages.flatMap((path, i) =>
 )
 
 describe('open pages', () => {
-  it.each(rounds)('%s at %d px, %s', async (path, width, theme) => {
-    const visited = await visit(browser, app.url, width)
+  it.concurrent.each(rounds)('%s at %d px, %s', async (path, width, theme) => {
+    const visited = await visit(width)
     await visited.page.addInitScript(
       (chosen) => localStorage.setItem('longpoint.preferences', JSON.stringify({ theme: chosen })),
       theme,
@@ -47,7 +35,7 @@ describe('open pages', () => {
   })
 
   it('say kindly that nothing is there', async () => {
-    const visited = await visit(browser, app.url, 390)
+    const visited = await visit(390)
     const response = await visited.page.goto('/handbook/no-such-calculator')
     expect(response?.status()).toBe(404)
     expect(await visited.page.locator('h1').innerText()).not.toBe('')
@@ -55,7 +43,7 @@ describe('open pages', () => {
   })
 
   it('need no script to show the answer of the example', async () => {
-    const context = await browser.newContext({ baseURL: app.url, javaScriptEnabled: false })
+    const context = await visitWithoutScripts()
     const page = await context.newPage()
     await page.goto('/handbook/miter')
     expect(await page.locator('main').innerText()).toContain('Set the saw, 0 is square')
@@ -64,7 +52,7 @@ describe('open pages', () => {
   })
 
   it('set the security headers and load nothing from elsewhere', async () => {
-    const visited = await visit(browser, app.url, 1440)
+    const visited = await visit(1440)
     const hosts = new Set<string>()
     visited.page.on('request', (request) => hosts.add(new URL(request.url()).host))
     const response = await visited.page.goto('/handbook/pitch')
@@ -76,7 +64,7 @@ describe('open pages', () => {
     expect(policy).toContain("frame-ancestors 'none'")
     expect(policy).toContain("object-src 'none'")
     expect(headers['x-content-type-options']).toBe('nosniff')
-    expect([...hosts]).toEqual([new URL(app.url).host])
+    expect([...hosts]).toEqual([host()])
     await visited.context.close()
   })
 })
