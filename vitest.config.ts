@@ -1,3 +1,4 @@
+import { availableParallelism } from 'node:os'
 import { defineConfig } from 'vitest/config'
 
 const alias = { '@': import.meta.dirname, 'server-only': `${import.meta.dirname}/tests/support/server-only.ts` }
@@ -26,6 +27,8 @@ function project(
 
 export default defineConfig({
   test: {
+    // Left to itself it keeps a core free, which on a machine of two halves the speed.
+    maxWorkers: availableParallelism(),
     projects: [
       project('unit'),
       project('proof'),
