@@ -8,6 +8,7 @@ import { loadedScripts } from './bench/loaded'
 import { dataDirectory, enter } from './setup/entry.mjs'
 import { Lock } from './setup/lock.mjs'
 import { step } from './setup/progress.mjs'
+import { endLeftovers } from './setup/service'
 import { Stop } from './setup/stop.mjs'
 import { Stage, testBuild } from './test/stage'
 
@@ -16,7 +17,7 @@ const lines = ({ count, median, p90, largest }: Spread) => `${count}, median ${m
 
 /** `npm run bench`: what each prerendered page loads against a bare page of the same day, and how large the sources are. */
 await enter(async () => {
-  const { TEST_APP_URL = '' } = await stageOfTests().setFor('browser')
+  const { TEST_APP_URL = '' } = await (await stageOfTests()).setFor('browser')
   const floor = await measureFloor('.data/bench-floor')
   const built = pagesOf(testBuild)
   const loaded = await step('Opening each page in Chromium', () =>
@@ -47,10 +48,12 @@ await enter(async () => {
 })
 
 /** The build and the app the browser tests look at: measured is what is tested, and a running app keeps its build. */
-function stageOfTests(): Stage {
+async function stageOfTests(): Promise<Stage> {
   const directory = path.join(dataDirectory(), 'test')
   const lock = new Lock(directory)
-  if ('heldBy' in lock.take()) throw new Stop('The tests are running. Wait for them to end, then measure.')
+  const taken = lock.take()
+  if ('heldBy' in taken) throw new Stop('The tests are running. Wait for them to end, then measure.')
+  await endLeftovers(taken.leftovers, 10_000)
   return new Stage(lock, directory)
 }
 

@@ -61,6 +61,11 @@ export function unwindOnSignals() {
       void unwind().then(() => process.exit(code))
     })
   }
+  // What nobody caught ends this process at once; what it started must not outlive it.
+  process.on('uncaughtException', (error) => {
+    process.stderr.write(`\n${error instanceof Error ? (error.stack ?? error.message) : String(error)}\n`)
+    void unwind().then(() => process.exit(1))
+  })
   // A terminal that went away must not turn the clean-up into a crash.
   for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {})
 }
