@@ -10,6 +10,7 @@ import { TextField } from '@/components/ui/text-field'
 import { signIn } from '@/lib/queries/session'
 import { signInSchema, type SignInForm as Typed } from '@/lib/schemas/account'
 import { FormProblem } from './form-problem'
+import { SigningInNeedsScripts } from './signing-in-needs-scripts'
 import { useSending } from './use-sending'
 
 /** E-mail and password; goes on to `from` when they fit. */
@@ -20,7 +21,7 @@ export function SignInForm({ from }: { from: string }) {
     defaultValues: { email: '', password: '' } satisfies Typed,
   })
   const { errors } = form.formState
-  const { submit, sending, problem } = useSending(form, async (pair) => {
+  const { submit, ready, sending, problem } = useSending(form, async (pair) => {
     await signIn(pair)
     await refreshMe()
     router.push(from)
@@ -28,6 +29,7 @@ export function SignInForm({ from }: { from: string }) {
   })
   return (
     <form onSubmit={submit} method="post" noValidate>
+      <SigningInNeedsScripts />
       <TextField
         label="E-mail"
         type="email"
@@ -43,7 +45,7 @@ export function SignInForm({ from }: { from: string }) {
         {...form.register('password')}
       />
       <FormProblem>{problem}</FormProblem>
-      <Button type="submit" variant="primary" disabled={sending}>
+      <Button type="submit" variant="primary" disabled={!ready || sending}>
         {sending ? 'Signing in…' : 'Sign in'}
       </Button>
       <p className="mt-6">

@@ -12,6 +12,7 @@ import { openShop } from '@/lib/queries/account'
 import { signIn } from '@/lib/queries/session'
 import { startSchema } from '@/lib/schemas/account'
 import { FormProblem } from './form-problem'
+import { SigningInNeedsScripts } from './signing-in-needs-scripts'
 import { useSending } from './use-sending'
 
 const empty = { name: '', shop: '', email: '', password: '' }
@@ -22,7 +23,7 @@ export function StartForm({ from }: { from: string }) {
   const [key] = useState(() => crypto.randomUUID())
   const form = useForm({ resolver: zodResolver(startSchema), defaultValues: empty })
   const { errors } = form.formState
-  const { submit, sending, problem } = useSending(form, async (start) => {
+  const { submit, ready, sending, problem } = useSending(form, async (start) => {
     await openShop(start, key)
     await signIn(start)
     await refreshMe()
@@ -31,6 +32,7 @@ export function StartForm({ from }: { from: string }) {
   })
   return (
     <form onSubmit={submit} method="post" noValidate>
+      <SigningInNeedsScripts />
       <TextField
         label="Your name"
         autoComplete="name"
@@ -61,7 +63,7 @@ export function StartForm({ from }: { from: string }) {
         {...form.register('password')}
       />
       <FormProblem>{problem}</FormProblem>
-      <Button type="submit" variant="primary" disabled={sending}>
+      <Button type="submit" variant="primary" disabled={!ready || sending}>
         {sending ? 'Opening your job book…' : 'Open the job book'}
       </Button>
       <p className="mt-6">

@@ -1,6 +1,7 @@
 'use client'
 
 import type { FieldValues, Path, UseFormReturn } from 'react-hook-form'
+import { useHydrated } from '@/components/ui/use-hydrated'
 import { ProblemError } from '@/lib/queries/send'
 import { sentenceOf } from '@/lib/queries/sentence'
 
@@ -19,7 +20,10 @@ export function useSending<Typed extends FieldValues, Read>(
       form.setError(field as Path<Typed>, { message }, { shouldFocus: i === 0 })
     if (known.length === 0) form.setError('root', { message: sentenceOf(error) })
   }
+  const ready = useHydrated()
   return {
+    /** False until the page's scripts are there: sent without them, a form would only be emptied. */
+    ready,
     submit: form.handleSubmit((values) => work(values).catch(refuse)),
     sending: form.formState.isSubmitting,
     problem: form.formState.errors.root?.message,
