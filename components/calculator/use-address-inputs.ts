@@ -6,12 +6,18 @@ import { readAddress, writeAddress, type RawInputs } from './address'
 
 /** Browsers refuse an address that changes at every keystroke; the page follows at once, the address a moment later. */
 const settleMs = 250
+/** By then the router has answered. */
+const routerMs = 1500
 
 const listeners = new Set<() => void>()
+/** What was typed on the page at `path`; it stands there until one goes elsewhere, whatever becomes of the address bar. */
 let ahead: { path: string; search: string } | null = null
 let timer: ReturnType<typeof setTimeout> | undefined
 
-/** What was typed on a page that has been left meanwhile is none of this page's. */
+/**
+ * What was typed on a page that has been left meanwhile is none of this page's. On this page it stands over the address
+ * bar: the router answers a changed address later, and may then write an older one over a newer.
+ */
 const searchNow = () => (ahead?.path === location.pathname ? ahead.search : location.search)
 
 /** Other things that the address says, such as the kept sheet that is being revised, stay. */
@@ -23,10 +29,17 @@ function withOthers(fields: Fields, search: string, written: string): string {
 }
 
 function settle(): void {
+  if (timer === undefined) return
   clearTimeout(timer)
-  if (ahead?.path === location.pathname)
+  timer = undefined
+  write()
+  setTimeout(write, routerMs)
+}
+
+/** Writes what was typed into the address bar, where it does not stand there yet. */
+function write(): void {
+  if (ahead?.path === location.pathname && ahead.search !== location.search)
     history.replaceState(history.state, '', `${ahead.path}${ahead.search}${location.hash}`)
-  ahead = null
 }
 
 function change(search: string): void {
@@ -38,6 +51,8 @@ function change(search: string): void {
 
 function subscribe(listener: () => void): () => void {
   const moved = () => {
+    clearTimeout(timer)
+    timer = undefined
     ahead = null
     listener()
   }
@@ -49,6 +64,7 @@ function subscribe(listener: () => void): () => void {
   return () => {
     listeners.delete(listener)
     settle()
+    if (listeners.size === 0) ahead = null
     window.removeEventListener('popstate', moved)
     window.removeEventListener('pagehide', settle)
     document.removeEventListener('click', settle, true)

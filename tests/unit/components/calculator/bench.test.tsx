@@ -56,6 +56,18 @@ describe('the bench', () => {
     expect([addressSays('job'), addressSays('sheet'), addressSays('revision')]).toEqual(['7', '2', '1'])
   })
 
+  it('loses nothing when the router writes an older address over a newer one', async () => {
+    const { below, user } = await open('?slopeBelow=20&slopeAbove=-4')
+    await user.clear(below)
+    await user.type(below, '24')
+    await expect.poll(() => addressSays('slopeBelow')).toBe('24')
+    history.replaceState(null, '', '/?slopeBelow=20&slopeAbove=-4')
+    await user.type(screen.getByLabelText('Slope above the knuckle'), '.5')
+    expect(below.value).toBe('24')
+    expect(answer()).toContain('14 1/4°')
+    await expect.poll(() => [addressSays('slopeBelow'), addressSays('slopeAbove')]).toEqual(['24', '-4.5'])
+  })
+
   it('keeps what was typed, and the last answer, beside the sentence on what is off', async () => {
     const { below, user } = await open('?slopeBelow=20')
     await user.clear(below)
