@@ -6,6 +6,7 @@ import { readQuantity } from '@/lib/trade/quantity/read'
 import type { NumberField } from './field-kinds'
 import { FractionStrip } from './fraction-strip'
 import { Pad } from './pad'
+import { pressKey, setFraction } from './pad-text'
 import type { PadState } from './use-pad'
 
 interface PadDockProps {
@@ -61,13 +62,13 @@ export function PadDock({ pad, field, text, precision, form }: PadDockProps) {
         <FractionStrip
           den={den}
           part={partOf(text, field)}
-          onPick={(divisions) => pad.fraction(divisions, den)}
+          onPick={(divisions) => pad.edit((now) => setFraction(now, divisions, den))}
           label={`Fraction of ${field?.label ?? 'the measure'}`}
         />
       ) : (
         <div className="strip strip-none" aria-hidden="true" />
       )}
-      <Pad onKey={pad.press} onNext={next} onKeyboard={keyboard} />
+      <Pad onKey={(key) => pad.edit((now, fresh) => pressKey(now, key, fresh))} onNext={next} onKeyboard={keyboard} />
     </div>
   )
 }

@@ -1,7 +1,6 @@
 'use client'
 
 import { useState } from 'react'
-import { pressKey, setFraction, type PadKey } from './pad-text'
 
 export interface PadState {
   /** Name of the row that the pad writes into. */
@@ -11,8 +10,8 @@ export interface PadState {
   /** The reader asked for the device's own keyboard. */
   keyboard: boolean
   activate: (name: string) => void
-  press: (key: PadKey) => void
-  fraction: (divisions: number, den: number) => void
+  /** Changes the row's text; `fresh` until the first change after it was chosen. */
+  edit: (change: (text: string, fresh: boolean) => string) => void
   askKeyboard: () => void
 }
 
@@ -30,11 +29,6 @@ export function usePad({ ready, names, textOf, write }: PadRows): PadState {
   const [fresh, setFresh] = useState(true)
   const [keyboard, setKeyboard] = useState(false)
   const active = chosen !== undefined && names.includes(chosen) ? chosen : names[0]
-  const edit = (next: (text: string) => string) => {
-    if (active === undefined) return
-    write(active, next(textOf(active)))
-    setFresh(false)
-  }
   return {
     active,
     open: ready || chosen !== undefined,
@@ -43,8 +37,11 @@ export function usePad({ ready, names, textOf, write }: PadRows): PadState {
       setFresh(name !== active || chosen === undefined)
       setChosen(name)
     },
-    press: (key) => edit((text) => pressKey(text, key, fresh)),
-    fraction: (divisions, den) => edit((text) => setFraction(text, divisions, den)),
+    edit: (change) => {
+      if (active === undefined) return
+      write(active, change(textOf(active), fresh))
+      setFresh(false)
+    },
     askKeyboard: () => setKeyboard(true),
   }
 }

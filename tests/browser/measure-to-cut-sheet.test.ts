@@ -56,8 +56,12 @@ describe.each(widths)('from a field measure to a cut sheet at %d px, without sig
     expect(await printedPages(page, 'A4')).toBe(1)
 
     const drawn = page.waitForResponse('**/api/calculators/handrail/sheet')
+    const shown = context.waitForEvent('page')
     await page.getByRole('button', { name: 'PDF, Letter' }).click()
     expect((await drawn).status()).toBe(200)
+    // The PDF stands in a window of its own, in front of this page.
+    await (await shown).close()
+    await page.bringToFront()
     await context.setOffline(true)
     await page.getByLabel('Measured by').fill('R. Bell')
     await expect.poll(() => sheet.innerText()).toContain('R. Bell')

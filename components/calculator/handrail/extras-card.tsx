@@ -1,26 +1,9 @@
 'use client'
 
-import { lazy, Suspense } from 'react'
-import { ChoiceField } from '../../ui/choice-field'
 import { Panel } from '../../ui/panel'
-import { placeOf } from './fields-at'
-import { extraNames, withText, type ExtraName } from './measure'
-import { turnExtra } from './measure-edits'
-import { plainExtraKeys } from './measure-keys'
-import { Measured } from './measured'
-import { CautionsBeside } from './sheet-card'
+import { ExtraSetsLater } from './later-drawings'
+import { extraNames } from './measure'
 import { useFieldSheet } from './sheet-context'
-
-/** Few tape every bracket on the stair. */
-const BracketPlaces = lazy(async () => ({ default: (await import('./bracket-places')).BracketPlaces }))
-
-const extras: Readonly<Record<ExtraName, string>> = {
-  brackets: 'Brackets',
-  stock: 'Stock',
-  weld: 'Filler and time',
-  code: 'Code rows',
-  volutes: 'Volutes',
-}
 
 /** What is not of the stair itself: folded until it is wanted, or until something in it is off. */
 export function ExtrasCard() {
@@ -30,63 +13,8 @@ export function ExtrasCard() {
     <Panel className="sheet-card px-5 py-2 max-sm:px-4">
       <details className="sheet-extras" open={off || undefined}>
         <summary>Brackets, stock, filler, code rows, volutes</summary>
-        {extraNames.map((name) => (
-          <ExtraSet key={name} name={name} />
-        ))}
+        <ExtraSetsLater />
       </details>
     </Panel>
-  )
-}
-
-function ExtraSet({ name }: { name: ExtraName }) {
-  const { measure, store } = useFieldSheet()
-  const on = measure[name].on === 'yes'
-  const turn = () => store.type((now) => turnExtra(now, name))
-  return (
-    <fieldset className="extra-set">
-      <legend className="sr-only">{placeOf(name)}</legend>
-      <label className="extra-switch">
-        <input type="checkbox" checked={on} onChange={turn} />
-        <span>{extras[name]}</span>
-      </label>
-      {on && (name === 'brackets' ? <BracketMeasures /> : <PlainMeasures name={name} />)}
-      {on && <CautionsBeside name={name === 'code' ? 'checks' : name} />}
-    </fieldset>
-  )
-}
-
-const PlainMeasures = ({ name }: { name: Exclude<ExtraName, 'brackets'> }) => (
-  <div className="measure-pair">
-    {plainExtraKeys[name].map((key) => (
-      <Measured key={key} path={`${name}.${key}`} />
-    ))}
-  </div>
-)
-
-function BracketMeasures() {
-  const { measure, store } = useFieldSheet()
-  const field = measure.brackets.way === 'field'
-  return (
-    <>
-      <ChoiceField
-        label="Set out"
-        options={[
-          { value: 'spaced', name: 'Evenly' },
-          { value: 'field', name: 'Where taped' },
-        ]}
-        value={field ? 'field' : 'spaced'}
-        onChange={(way) => store.type((now) => withText(now, 'brackets.way', way))}
-      />
-      {field && (
-        <Suspense fallback={null}>
-          <BracketPlaces />
-        </Suspense>
-      )}
-      <div className="measure-pair">
-        {(field ? ['jointClear'] : ['endDistance', 'maxSpacing']).map((key) => (
-          <Measured key={key} path={`brackets.${key}`} />
-        ))}
-      </div>
-    </>
   )
 }

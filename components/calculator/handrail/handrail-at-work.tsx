@@ -2,7 +2,6 @@
 
 import { lazy, Suspense, type ComponentProps } from 'react'
 import { useSheetPlace } from '../../job/use-sheet-place'
-import { LoadingState } from '../../ui/states'
 import { HandrailScreen } from './handrail-screen'
 
 /** Fetched by those only who open the page for a kept sheet. */
@@ -13,7 +12,7 @@ export function HandrailAtWork(screen: Omit<ComponentProps<typeof HandrailScreen
   const place = useSheetPlace()
   if (place?.sheet === undefined) return <HandrailScreen {...screen} />
   return (
-    <Suspense fallback={<LoadingState title="Opening the saved measure…" />}>
+    <Suspense fallback={null}>
       <KeptMeasure opened={place} screen={screen} />
     </Suspense>
   )

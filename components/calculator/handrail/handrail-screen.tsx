@@ -1,7 +1,6 @@
 'use client'
 
 import { lazy, Suspense, type ReactNode } from 'react'
-import { CautionPanel } from '../../ui/caution-panel'
 import { useLastUsed } from '../last-used'
 import type { Typeset } from '../working'
 import { FieldSheet } from './field-sheet'
@@ -10,7 +9,7 @@ import { LitProvider } from './lit'
 import { OriginBar } from './origin-bar'
 import { placedFaults } from './placed-faults'
 import { RailActions } from './rail-actions'
-import { RailBeingOffLater, RailPlateLater, RailResultsLater, WorkingLater } from './later-drawings'
+import { RailBeingOffLater, RailCautionsLater, RailPlateLater, RailResultsLater, WorkingLater } from './later-drawings'
 import { useMadeAhead } from './use-made-ahead'
 import type { MeasureStore } from './measure-store'
 import { UndoLine } from './undo-line'
@@ -46,7 +45,6 @@ function Bench({ store, typeset, aside, children }: HandrailScreenProps & { stor
   const faults = placedFaults(state.measure, state.faults)
   useLastUsed(calculator.id)
   useMadeAhead(state.origin, preferences)
-  const alone = cautions.filter(({ beside }) => beside === undefined)
   return (
     <>
       <div className="rail-bench">
@@ -69,11 +67,7 @@ function Bench({ store, typeset, aside, children }: HandrailScreenProps & { stor
           </div>
           <RailActions state={state} />
           {rail && <RailResultsLater state={state} rail={rail} />}
-          {alone.map(({ signal, text }) => (
-            <CautionPanel key={text} signal={signal}>
-              {text}
-            </CautionPanel>
-          ))}
+          <RailCautionsLater cautions={cautions} />
         </div>
       </div>
       <div className="below">

@@ -1,12 +1,14 @@
 'use client'
 
-import { useState } from 'react'
-import { SaveToJob } from '../../job/save-to-job'
+import { lazy, Suspense, useState } from 'react'
 import { Button, ButtonLink } from '../../ui/button'
 import { untilAwake } from './awake'
 import { measureQuery } from './measure-address'
 import { mirrorHand } from './measure-edits'
 import type { HandrailState } from './use-handrail'
+
+/** The example is not kept: fetched once there is a measure of one's own. */
+const SaveToJob = lazy(async () => ({ default: (await import('../../job/save-to-job')).SaveToJob }))
 
 /** Fetched when somebody stirs, so that it is there when the network is not. */
 const plainText = () => import('./plain-text')
@@ -31,7 +33,11 @@ export function RailActions({ state }: { state: HandrailState }) {
     return <p className="rail-actions-wait">Print, save and copy stand here as soon as the measures are whole.</p>
   return (
     <div className="actions rail-actions no-print">
-      {origin === 'own' && <SaveToJob calculator="handrail" inputs={raw} />}
+      {origin === 'own' && (
+        <Suspense fallback={<Button disabled>Save to a job</Button>}>
+          <SaveToJob calculator="handrail" inputs={raw} />
+        </Suspense>
+      )}
       <ButtonLink href={`/handbook/handrail/sheet${measureQuery(measure)}`} prefetch={false}>
         Print cut sheet
       </ButtonLink>
