@@ -1,7 +1,7 @@
 import { atanDeg } from '@/lib/trade/angles'
 import { miterAt, type LongPointFace } from '@/lib/trade/miter'
 import type { Exercise, Knuckle, Slip } from './exercise'
-import type { Draws } from './seed'
+import { drawFlights, drawLevel, drawSaw } from './knuckle-givens'
 
 type Saw = { sawAtSquare: 0 | 90 }
 type Stair = Saw & { unitRise: number; unitRun: number }
@@ -20,27 +20,6 @@ const pitchOf = ({ unitRise, unitRun }: Stair) => atanDeg(unitRise, unitRun)
 const topOf = (stair: Stair) => miterOf({ slopeBelow: pitchOf(stair), slopeAbove: 0 })
 
 const bothClimb = ({ slopeBelow, slopeAbove }: Knuckle) => slopeBelow > 0 && slopeAbove > 0
-
-const drawSaw = ({ pick }: Draws) => pick([0, 90] as const)
-
-/** A flight that meets a level run, at its top or at its foot. */
-function drawLevel({ pick, step }: Draws): Knuckle {
-  const pitch = step(28, 40, 1 / 2)
-  return pick([
-    { slopeBelow: pitch, slopeAbove: 0 },
-    { slopeBelow: 0, slopeAbove: pitch },
-  ])
-}
-
-/** Two flights that climb the same way, one of them steeper by enough to need a knuckle. */
-function drawFlights({ pick, step }: Draws): Knuckle {
-  const easy = step(24, 36, 1 / 2)
-  const steep = step(Math.max(28, easy + 4), 40, 1 / 2)
-  return pick([
-    { slopeBelow: steep, slopeAbove: easy },
-    { slopeBelow: easy, slopeAbove: steep },
-  ])
-}
 
 /** Saw setting from unit rise and unit run, where a flight turns level at its top. */
 export const sawSetting: Exercise<Stair> = {
